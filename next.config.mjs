@@ -16,6 +16,23 @@ const config = {
     '@react-pdf/renderer',
     'rate-limiter-flexible',
   ],
+  // The content security policy needs a nonce a request and comes from proxy.ts; these are the same for every answer.
+  async headers() {
+    return [
+      {
+        source: '/:path*',
+        headers: [
+          { key: 'x-content-type-options', value: 'nosniff' },
+          { key: 'referrer-policy', value: 'strict-origin-when-cross-origin' },
+          { key: 'x-frame-options', value: 'DENY' },
+          { key: 'cross-origin-opener-policy', value: 'same-origin' },
+          { key: 'permissions-policy', value: 'camera=(self), microphone=(self), geolocation=(), payment=()' },
+          // Ignored by browsers over plain http, so the demo on localhost is untouched.
+          { key: 'strict-transport-security', value: 'max-age=31536000; includeSubDomains' },
+        ],
+      },
+    ];
+  },
   experimental: { authInterrupts: true, serverActions: { bodySizeLimit: '12mb' } },
 };
 

@@ -6,7 +6,7 @@ import type { Config } from 'tailwindcss';
  */
 export default {
   content: ['./app/**/*.{ts,tsx}', './components/**/*.{ts,tsx}'],
-  darkMode: ['selector', '[data-theme="night"]'],
+  darkMode: 'media',
   theme: {
     colors: {
       transparent: 'transparent',

@@ -1,0 +1,68 @@
+'use client';
+
+import { FormProvider, getFormProps, type SubmissionResult, useForm } from '@conform-to/react';
+import { type ReactNode, useActionState, useEffect, useRef } from 'react';
+import { type ButtonTone, buttonClass } from '../ui/button';
+import { ErrorSummary } from './error-summary';
+
+export type FormState = SubmissionResult<string[]> | null;
+
+type ActionFormProps = {
+  action: (previous: FormState, form: FormData) => Promise<FormState>;
+  children?: ReactNode;
+  /** The submit button's words. */
+  submit: string;
+  tone?: ButtonTone;
+  /** Values the page knows already; what the person typed wins after a refusal. */
+  defaultValue?: Record<string, unknown>;
+  /** Ids and the like. Never trusted: the action checks them again. */
+  hidden?: Record<string, string | number>;
+  /** Said after it worked, where the action stays on the page. */
+  done?: string;
+  /** Words for each field name in the error summary; a field's own label otherwise. */
+  labels?: Record<string, string>;
+  /** More buttons or links beside the submit. */
+  beside?: ReactNode;
+  className?: string;
+};
+
+/**
+ * The form of the product: works without JavaScript, keeps what was typed, names each error at its field and in a
+ * summary that takes the focus, and says when it is done.
+ */
+export function ActionForm(props: ActionFormProps) {
+  const [state, send, pending] = useActionState(props.action, null);
+  const [form] = useForm<Record<string, unknown>>({
+    lastResult: state,
+    defaultValue: props.defaultValue,
+    // The page's own words, not the browser's bubbles.
+    defaultNoValidate: true,
+  });
+  const summary = useRef<HTMLDivElement>(null);
+  useEffect(() => {
+    if (state?.status === 'error') summary.current?.focus();
+  }, [state]);
+
+  return (
+    <FormProvider context={form.context}>
+      <form {...getFormProps(form)} action={send} noValidate className={props.className ?? 'grid max-w-prose gap-6'}>
+        <ErrorSummary ref={summary} errors={form.allErrors} formId={form.id} labels={props.labels} />
+        <div role="status" className="empty:hidden">
+          {state?.status === 'success' && props.done && (
+            <p className="border-l-8 border-moss bg-panel px-5 py-3 font-semibold text-moss">{props.done}</p>
+          )}
+        </div>
+        {Object.entries(props.hidden ?? {}).map(([name, value]) => (
+          <input key={name} type="hidden" name={name} value={value} />
+        ))}
+        {props.children}
+        <div className="flex flex-wrap items-center gap-4">
+          <button type="submit" className={buttonClass(props.tone ?? 'primary')} aria-disabled={pending}>
+            {pending ? 'One moment…' : props.submit}
+          </button>
+          {props.beside}
+        </div>
+      </form>
+    </FormProvider>
+  );
+}

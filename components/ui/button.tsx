@@ -1,0 +1,29 @@
+import Link from 'next/link';
+import type { ComponentProps } from 'react';
+
+export type ButtonTone = 'primary' | 'plain' | 'danger' | 'quiet';
+
+const BASE =
+  'inline-flex min-h-target items-center justify-center gap-2 rounded px-4 py-2 font-body font-semibold leading-tight no-underline transition-colors disabled:opacity-60 aria-disabled:opacity-60';
+const TONES: Record<ButtonTone, string> = {
+  // One a screen: brass under ink is the second ink of the board.
+  primary: 'bg-brass text-on-brass border-2 border-on-brass/80 hover:border-ink',
+  plain: 'border-2 border-pine text-pine bg-transparent hover:bg-pine hover:text-on-pine',
+  danger: 'border-2 border-reed text-reed bg-transparent hover:bg-reed hover:text-board',
+  quiet: 'text-lake underline underline-offset-4 px-2 hover:decoration-2',
+};
+
+export const buttonClass = (tone: ButtonTone, more = '') => `${BASE} ${TONES[tone]} ${more}`;
+
+type ButtonProps = ComponentProps<'button'> & { tone?: ButtonTone };
+
+export function Button({ tone = 'plain', className, type = 'button', ...rest }: ButtonProps) {
+  return <button type={type} className={buttonClass(tone, className)} {...rest} />;
+}
+
+type ButtonLinkProps = ComponentProps<typeof Link> & { tone?: ButtonTone };
+
+/** A link that leads on, drawn like a button. */
+export function ButtonLink({ tone = 'plain', className, ...rest }: ButtonLinkProps) {
+  return <Link className={buttonClass(tone, className)} {...rest} />;
+}

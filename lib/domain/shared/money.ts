@@ -1,0 +1,49 @@
+import currencies from 'currency-codes';
+
+/** Money in integer minor units of its currency (cents, yen, fils). */
+export type Minor = number & { readonly __minor: true };
+
+/** Throws on anything but a safe whole number: a fraction of a cent is a bug. */
+export function minor(amount: number): Minor {
+  if (!Number.isSafeInteger(amount)) throw new RangeError(`Not a whole number of minor units: ${amount}`);
+  return amount as Minor;
+}
+
+export const addMinor = (...parts: Minor[]): Minor => minor(parts.reduce((sum, part) => sum + part, 0));
+
+/** Digits after the point by ISO 4217 (JPY 0, EUR 2, BHD 3); `Intl` differs for HUF and others. Throws if unknown. */
+export function currencyDigits(code: string): number {
+  const entry = currencies.code(code);
+  if (!entry) throw new RangeError(`Unknown currency: ${code}`);
+  return entry.digits;
+}
+
+export const isCurrency = (code: string): boolean => currencies.code(code) !== undefined;
+
+export const listCurrencies = (): { code: string; name: string }[] =>
+  currencies.data.map(({ code, currency }) => ({ code, name: currency }));
+
+/** `formatMoney(46000, 'EUR')` → "€460.00". Digits come from ISO 4217. */
+export function formatMoney(amount: Minor, currency: string, locale = 'en-GB'): string {
+  const digits = currencyDigits(currency);
+  return new Intl.NumberFormat(locale, {
+    style: 'currency',
+    currency,
+    minimumFractionDigits: digits,
+    maximumFractionDigits: digits,
+  }).format(amount / 10 ** digits);
+}
+
+/**
+ * A typed amount ("460", "460.50", "1,250.00") to minor units; null when it is no amount or has more decimals than
+ * the currency has. A comma or space is taken as a thousands mark only before groups of three digits.
+ */
+export function parseMoney(text: string, currency: string): Minor | null {
+  const digits = currencyDigits(currency);
+  const plain = text.trim().replace(/(?<=\d)[,\u00a0\u202f ](?=\d{3}(\D|$))/g, '');
+  const match = /^(\d{1,12})(?:[.,](\d+))?$/.exec(plain);
+  if (!match) return null;
+  const fraction = match[2] ?? '';
+  if (fraction.length > digits) return null;
+  return minor(Number(match[1]) * 10 ** digits + Number(fraction.padEnd(digits, '0') || '0'));
+}

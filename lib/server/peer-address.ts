@@ -1,0 +1,43 @@
+import 'server-only';
+import http from 'node:http';
+import { randomUUID } from 'node:crypto';
+import { env } from './env';
+
+/** Set by us on every request before Next sees it; whatever a client sent under these names is dropped. */
+const PEER_HEADER = 'x-combwood-peer';
+const REQUEST_HEADER = 'x-combwood-request';
+
+const marked = globalThis as typeof globalThis & { combwoodPeerMarked?: boolean };
+
+/**
+ * Route handlers see no socket, and Next passes a client's own X-Forwarded-For on, so rate limits by address could be
+ * walked around (ASVS 4.1.3). This notes the socket's address, and a request id, on each request as it arrives.
+ */
+export function markRequests(): void {
+  if (marked.combwoodPeerMarked) return;
+  marked.combwoodPeerMarked = true;
+  const emit = http.Server.prototype.emit;
+  http.Server.prototype.emit = function patched(this: http.Server, event: string, ...args: unknown[]) {
+    const request = args[0];
+    if (event === 'request' && request instanceof http.IncomingMessage) {
+      request.headers[PEER_HEADER] = request.socket.remoteAddress ?? '';
+      request.headers[REQUEST_HEADER] = randomUUID();
+    }
+    return emit.call(this, event, ...args);
+  } as typeof emit;
+}
+
+/** The client's address: the socket's, or behind N trusted proxies the Nth entry from the right of X-Forwarded-For. */
+export function clientAddress(headers: Headers): string {
+  const hops = env().TRUSTED_PROXIES;
+  if (hops > 0) {
+    const chain = (headers.get('x-forwarded-for') ?? '').split(',').map((part) => part.trim());
+    // Next adds the socket's own address only when the header is absent, so the list is the proxies' alone.
+    const at = chain[chain.length - hops];
+    if (at) return at;
+  }
+  return headers.get(PEER_HEADER) ?? 'unknown';
+}
+
+/** The id that this request's log lines carry; also shown to a person when something breaks. */
+export const requestId = (headers: Headers): string => headers.get(REQUEST_HEADER) ?? randomUUID();
