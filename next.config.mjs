@@ -26,7 +26,10 @@ const config = {
           { key: 'referrer-policy', value: 'strict-origin-when-cross-origin' },
           { key: 'x-frame-options', value: 'DENY' },
           { key: 'cross-origin-opener-policy', value: 'same-origin' },
-          { key: 'permissions-policy', value: 'camera=(self), microphone=(self), geolocation=(), payment=()' },
+          {
+            key: 'permissions-policy',
+            value: 'camera=(self), microphone=(self), geolocation=(), payment=()',
+          },
           // Ignored by browsers over plain http, so the demo on localhost is untouched.
           { key: 'strict-transport-security', value: 'max-age=31536000; includeSubDomains' },
         ],

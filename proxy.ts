@@ -37,7 +37,8 @@ const paymentOrigin = (): string =>
 export const config = {
   matcher: [
     {
-      source: '/((?!_next/static|_next/image|api/|favicon.ico|icon|fonts/|.*\\.(?:wasm|js|css|svg|png|webp|ics|txt)$).*)',
+      source:
+        '/((?!_next/static|_next/image|api/|favicon.ico|icon|fonts/|.*\\.(?:wasm|js|css|svg|png|webp|ics|txt)$).*)',
       missing: [{ type: 'header', key: 'next-router-prefetch' }],
     },
   ],

@@ -12,7 +12,17 @@ import * as order from './schema/order';
 import * as organisation from './schema/organisation';
 import * as workshop from './schema/workshop';
 
-const schema = { ...account, ...audit, ...camp, ...door, ...mail, ...money, ...order, ...organisation, ...workshop };
+const schema = {
+  ...account,
+  ...audit,
+  ...camp,
+  ...door,
+  ...mail,
+  ...money,
+  ...order,
+  ...organisation,
+  ...workshop,
+};
 
 /**
  * Opens the database file (made when absent; tables come by `migrateDatabase`).

@@ -1,6 +1,12 @@
 'use client';
 
-import { FormProvider, getFormProps, type SubmissionResult, useForm } from '@conform-to/react';
+import {
+  type DefaultValue,
+  FormProvider,
+  getFormProps,
+  type SubmissionResult,
+  useForm,
+} from '@conform-to/react';
 import { type ReactNode, useActionState, useEffect, useRef } from 'react';
 import { type ButtonTone, buttonClass } from '../ui/button';
 import { ErrorSummary } from './error-summary';
@@ -34,7 +40,8 @@ export function ActionForm(props: ActionFormProps) {
   const [state, send, pending] = useActionState(props.action, null);
   const [form] = useForm<Record<string, unknown>>({
     lastResult: state,
-    defaultValue: props.defaultValue,
+    // Conform's type for an untyped form allows flat strings only; nested values work all the same.
+    defaultValue: props.defaultValue as DefaultValue<Record<string, unknown>>,
     // The page's own words, not the browser's bubbles.
     defaultNoValidate: true,
   });
@@ -45,7 +52,12 @@ export function ActionForm(props: ActionFormProps) {
 
   return (
     <FormProvider context={form.context}>
-      <form {...getFormProps(form)} action={send} noValidate className={props.className ?? 'grid max-w-prose gap-6'}>
+      <form
+        {...getFormProps(form)}
+        action={send}
+        noValidate
+        className={props.className ?? 'grid max-w-prose gap-6'}
+      >
         <ErrorSummary ref={summary} errors={form.allErrors} formId={form.id} labels={props.labels} />
         <div role="status" className="empty:hidden">
           {state?.status === 'success' && props.done && (

@@ -17,7 +17,10 @@ export function CheckField({ name, label, hint }: CheckFieldProps) {
       )}
       <label className="flex min-h-target items-start gap-3 py-2">
         <input
-          {...getInputProps(field, { type: 'checkbox', ariaDescribedBy: hint ? field.descriptionId : undefined })}
+          {...getInputProps(field, {
+            type: 'checkbox',
+            ariaDescribedBy: hint ? field.descriptionId : undefined,
+          })}
           key={field.key}
           className="mt-1 size-5 shrink-0 accent-pine"
         />

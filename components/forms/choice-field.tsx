@@ -23,7 +23,10 @@ export function ChoiceField({ name, legend, type, choices, hint }: ChoiceFieldPr
     <fieldset
       id={field.id}
       tabIndex={-1}
-      aria-describedby={[hint ? field.descriptionId : '', field.errors ? field.errorId : ''].filter(Boolean).join(' ') || undefined}
+      aria-describedby={
+        [hint ? field.descriptionId : '', field.errors ? field.errorId : ''].filter(Boolean).join(' ') ||
+        undefined
+      }
       className={field.errors ? 'border-l-4 border-reed pl-4' : ''}
     >
       <legend className="font-semibold">{legend}</legend>

@@ -18,7 +18,16 @@ type TextFieldProps = {
   'autoComplete' | 'inputMode' | 'min' | 'max' | 'step' | 'list' | 'autoCapitalize' | 'spellCheck'
 >;
 
-export function TextField({ name, label, hint, optional, type = 'text', rows, className, ...rest }: TextFieldProps) {
+export function TextField({
+  name,
+  label,
+  hint,
+  optional,
+  type = 'text',
+  rows,
+  className,
+  ...rest
+}: TextFieldProps) {
   const [field] = useField<string>(name);
   const aria = { ariaDescribedBy: hint ? field.descriptionId : undefined };
   return (
@@ -29,7 +38,7 @@ export function TextField({ name, label, hint, optional, type = 'text', rows, cl
           key={field.key}
           rows={rows}
           className={`${CONTROL} ${className ?? ''}`}
-          {...rest as object}
+          {...(rest as object)}
         />
       ) : (
         <input

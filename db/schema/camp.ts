@@ -1,6 +1,21 @@
-import { type AnySQLiteColumn, index, integer, sqliteTable, text, uniqueIndex } from 'drizzle-orm/sqlite-core';
+import {
+  type AnySQLiteColumn,
+  index,
+  integer,
+  sqliteTable,
+  text,
+  uniqueIndex,
+} from 'drizzle-orm/sqlite-core';
 import type { CampState, RoomLoudness, TrackLevel } from '@/lib/domain/camp/camp-words';
-import type { CampId, Id, InstructorId, OrganisationId, RoomId, TrackId, UserId } from '@/lib/domain/shared/ids';
+import type {
+  CampId,
+  Id,
+  InstructorId,
+  OrganisationId,
+  RoomId,
+  TrackId,
+  UserId,
+} from '@/lib/domain/shared/ids';
 import type { Minor } from '@/lib/domain/shared/money';
 import { user } from './account';
 import { organisation } from './organisation';
@@ -40,7 +55,9 @@ export const camp = sqliteTable(
     state: text('state').$type<CampState>().notNull().default('draft'),
     publishedAt: integer('published_at'),
     closedAt: integer('closed_at'),
-    copiedFrom: text('copied_from').$type<CampId>().references((): AnySQLiteColumn => camp.id),
+    copiedFrom: text('copied_from')
+      .$type<CampId>()
+      .references((): AnySQLiteColumn => camp.id),
     /** Goes up by one with each edit of the camp's own row: a stale form is refused, not merged. */
     version: integer('version').notNull().default(1),
     createdAt: integer('created_at').notNull(),

@@ -1,7 +1,15 @@
 import { index, integer, sqliteTable, text } from 'drizzle-orm/sqlite-core';
 import type { Id } from '@/lib/domain/shared/ids';
 
-export const MAIL_KINDS = ['verify', 'known-address', 'reset', 'invite', 'order-confirmed', 'packing-list', 'late-payment'] as const;
+export const MAIL_KINDS = [
+  'verify',
+  'known-address',
+  'reset',
+  'invite',
+  'order-confirmed',
+  'packing-list',
+  'late-payment',
+] as const;
 export type MailKind = (typeof MAIL_KINDS)[number];
 
 /** Outbox: a row is written in the transaction that causes the mail and drained by the background runner. */

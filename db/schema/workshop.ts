@@ -1,6 +1,14 @@
 import { index, integer, primaryKey, sqliteTable, text } from 'drizzle-orm/sqlite-core';
 import type { HarpAsk } from '@/lib/domain/harp/harp-ask';
-import type { CampId, Id, InstructorId, MeetingId, RoomId, TrackId, WorkshopId } from '@/lib/domain/shared/ids';
+import type {
+  CampId,
+  Id,
+  InstructorId,
+  MeetingId,
+  RoomId,
+  TrackId,
+  WorkshopId,
+} from '@/lib/domain/shared/ids';
 import type { WorkshopAudience, WorkshopKind } from '@/lib/domain/timetable/workshop-words';
 import { camp, instructor, room, track } from './camp';
 

@@ -22,7 +22,10 @@ type Spec<Schema extends z.ZodType, Value> = {
   rate?: Budget;
   /** Form fields whose values never go back to the page (passwords). */
   hide?: string[];
-  run: (input: z.output<Schema>, context: Context) => Result<Value, Refusal> | Promise<Result<Value, Refusal>>;
+  run: (
+    input: z.output<Schema>,
+    context: Context,
+  ) => Result<Value, Refusal> | Promise<Result<Value, Refusal>>;
   /** Usually a redirect; without one the form says it is saved. */
   onOk?: (value: Value, input: z.output<Schema>) => void | Promise<void>;
 };

@@ -51,6 +51,15 @@ export const sentenceOf = (refusal: Refusal): string => refusal.sentence ?? ERRO
 
 /** Logs a bug under the request's id and turns it into a refusal that names the reference. */
 export function brokenBy(error: unknown, id: string): Refusal {
-  log.error({ requestId: id, err: error instanceof Error ? { name: error.name, message: error.message, stack: error.stack } : String(error) }, 'broken');
+  log.error(
+    {
+      requestId: id,
+      err:
+        error instanceof Error
+          ? { name: error.name, message: error.message, stack: error.stack }
+          : String(error),
+    },
+    'broken',
+  );
   return { code: 'broken', sentence: `${ERRORS.broken.sentence.replace(/\.$/, '')} ${id.slice(0, 8)}.` };
 }

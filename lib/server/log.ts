@@ -10,7 +10,18 @@ export const log = pino({
   base: { app: 'combwood' },
   timestamp: pino.stdTimeFunctions.isoTime,
   redact: {
-    paths: ['password', 'token', 'email', 'name', 'cookie', 'authorization', 'payload', '*.password', '*.token', '*.email'],
+    paths: [
+      'password',
+      'token',
+      'email',
+      'name',
+      'cookie',
+      'authorization',
+      'payload',
+      '*.password',
+      '*.token',
+      '*.email',
+    ],
     censor: '[left out]',
   },
 });

@@ -1,6 +1,6 @@
 import 'server-only';
-import http from 'node:http';
 import { randomUUID } from 'node:crypto';
+import http from 'node:http';
 import { env } from './env';
 
 /** Set by us on every request before Next sees it; whatever a client sent under these names is dropped. */
@@ -23,7 +23,7 @@ export function markRequests(): void {
       request.headers[PEER_HEADER] = request.socket.remoteAddress ?? '';
       request.headers[REQUEST_HEADER] = randomUUID();
     }
-    return emit.call(this, event, ...args);
+    return Reflect.apply(emit, this, [event, ...args]);
   } as typeof emit;
 }
 

@@ -1,6 +1,6 @@
 import 'server-only';
 import { unstable_rethrow } from 'next/navigation';
-import { z } from 'zod';
+import type { z } from 'zod';
 import type { Permission } from '@/lib/domain/access/permissions';
 import type { Result } from '@/lib/domain/shared/result';
 import type { TargetKind } from './access/find-target';
@@ -20,7 +20,10 @@ type Spec<Schema extends z.ZodType> = {
   rate?: Budget;
   /** Largest JSON body in bytes. */
   limit?: number;
-  run: (input: z.output<Schema>, context: Context) => Result<Response, Refusal> | Promise<Result<Response, Refusal>>;
+  run: (
+    input: z.output<Schema>,
+    context: Context,
+  ) => Result<Response, Refusal> | Promise<Result<Response, Refusal>>;
 };
 
 export type Handler = ((request: Request, at: { params: Promise<Params> }) => Promise<Response>) & {

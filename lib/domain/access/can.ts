@@ -18,7 +18,7 @@ export function can(actor: Actor, permission: Permission, target: Target = null)
   if (rule.who === 'provider') return false;
   if (rule.who === 'signed-in') return actor.user !== null;
   if (rule.who === 'own') return target !== null && 'orderId' in target && ownsOrder(actor, target);
-  if (target === null || !('organisationId' in target)) return false;
+  if (rule.who !== 'staff' || target === null || !('organisationId' in target)) return false;
   return rolesIn(actor, target.organisationId).some((role) => rule.roles.includes(role));
 }
 

@@ -16,7 +16,11 @@ export const PERMISSIONS = {
   'order.read': { who: 'own', on: 'order' },
   'order.pay': { who: 'own', on: 'order' },
   'payment.notify': { who: 'provider' },
-  'organisation.read': { who: 'staff', on: 'organisation', roles: ['organiser', 'treasurer', 'instructor', 'door'] },
+  'organisation.read': {
+    who: 'staff',
+    on: 'organisation',
+    roles: ['organiser', 'treasurer', 'instructor', 'door'],
+  },
   'organisation.edit': { who: 'staff', on: 'organisation', roles: ['organiser'] },
   'staff.manage': { who: 'staff', on: 'organisation', roles: ['organiser'] },
   'camp.create': { who: 'staff', on: 'organisation', roles: ['organiser'] },

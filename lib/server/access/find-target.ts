@@ -13,7 +13,11 @@ export type TargetKind = 'organisation' | 'camp' | 'order';
 export function findTarget(kind: TargetKind, id: string): Target {
   const db = getDb();
   if (kind === 'organisation' && isId('org', id)) {
-    const row = db.select({ organisationId: organisation.id }).from(organisation).where(eq(organisation.id, id)).get();
+    const row = db
+      .select({ organisationId: organisation.id })
+      .from(organisation)
+      .where(eq(organisation.id, id))
+      .get();
     return row ?? null;
   }
   if (kind === 'camp' && isId('cmp', id)) {

@@ -1,4 +1,5 @@
 import 'server-only';
+import type { Route } from 'next';
 import { headers } from 'next/headers';
 import { forbidden, notFound, redirect } from 'next/navigation';
 import type { Actor } from '@/lib/domain/access/actor';
@@ -17,7 +18,7 @@ export async function requirePermission(
   if (!refusal) return actor;
   if (refusal.code === 'sign_in_first') {
     const path = (await headers()).get('x-combwood-path') ?? '/';
-    redirect(`/sign-in?next=${encodeURIComponent(path)}`);
+    redirect(`/sign-in?next=${encodeURIComponent(path)}` as Route);
   }
   if (refusal.code === 'not_allowed') forbidden();
   notFound();
