@@ -11,5 +11,6 @@ export default defineConfig({
     exclude: ['tests/e2e/**', 'node_modules/**'],
     testTimeout: 30_000,
     env: { NODE_ENV: 'test' },
+    setupFiles: ['tests/setup/test-env.ts'],
   },
 });

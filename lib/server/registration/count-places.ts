@@ -1,0 +1,71 @@
+import 'server-only';
+import { and, count, eq, inArray } from 'drizzle-orm';
+import { camp, track } from '@/db/schema/camp';
+import { registration, registrationWorkshop } from '@/db/schema/order';
+import { workshop } from '@/db/schema/workshop';
+import { SEATED_STATES } from '@/lib/domain/registration/states';
+import type { CampId, TrackId, WorkshopId } from '@/lib/domain/shared/ids';
+import { type Db, getDb, type Tx } from '../db';
+
+export type Places = { capacity: number; taken: number; left: number };
+export type CampPlaces = {
+  camp: Places;
+  tracks: { id: TrackId; places: Places }[];
+  /** Electives with a limit of their own; those without are left out. */
+  electives: { id: WorkshopId; places: Places }[];
+};
+
+const places = (capacity: number, taken: number): Places => ({
+  capacity,
+  taken,
+  left: Math.max(0, capacity - taken),
+});
+
+/**
+ * Places by counting rows: there is no counter that could disagree with them. Read it inside the transaction that
+ * takes a place; five statements whatever the size. Null when there is no such camp.
+ */
+export function countPlaces(campId: CampId, db: Db | Tx = getDb()): CampPlaces | null {
+  const head = db.select({ capacity: camp.capacity }).from(camp).where(eq(camp.id, campId)).get();
+  if (!head) return null;
+  const seated = and(eq(registration.campId, campId), inArray(registration.state, [...SEATED_STATES]));
+  const byTrack = new Map(
+    db
+      .select({ id: registration.trackId, taken: count() })
+      .from(registration)
+      .where(seated)
+      .groupBy(registration.trackId)
+      .all()
+      .map((row) => [row.id, row.taken]),
+  );
+  const byWorkshop = new Map(
+    db
+      .select({ id: registrationWorkshop.workshopId, taken: count() })
+      .from(registrationWorkshop)
+      .innerJoin(registration, eq(registration.id, registrationWorkshop.registrationId))
+      .where(seated)
+      .groupBy(registrationWorkshop.workshopId)
+      .all()
+      .map((row) => [row.id, row.taken]),
+  );
+  const tracks = db
+    .select({ id: track.id, capacity: track.capacity })
+    .from(track)
+    .where(eq(track.campId, campId))
+    .all();
+  const electives = db
+    .select({ id: workshop.id, capacity: workshop.capacity })
+    .from(workshop)
+    .where(and(eq(workshop.campId, campId), eq(workshop.audience, 'elective')))
+    .all();
+  return {
+    camp: places(
+      head.capacity,
+      [...byTrack.values()].reduce((sum, taken) => sum + taken, 0),
+    ),
+    tracks: tracks.map(({ id, capacity }) => ({ id, places: places(capacity, byTrack.get(id) ?? 0) })),
+    electives: electives.flatMap(({ id, capacity }) =>
+      capacity === null ? [] : [{ id, places: places(capacity, byWorkshop.get(id) ?? 0) }],
+    ),
+  };
+}
