@@ -1,0 +1,32 @@
+import type { Harp } from '../harp/harp';
+import { type HarpId, harpId } from '../harp/harp-id';
+import type { MeetingNeed } from './meeting-need';
+import type { HarpSource } from './packing-list';
+import { preferHarps } from './prefer-harps';
+
+/** Gives each need to one harp of the list: one that the same meeting needs anyway, else a required, an own, a common. */
+export function assignNeeds(
+  needs: readonly MeetingNeed[],
+  required: readonly Harp[],
+  helpful: readonly Harp[],
+  sourceOf: (harp: Harp) => HarpSource,
+): Map<HarpId, MeetingNeed[]> {
+  const rank = { owned: 0, loaner: 1, bring: 2 } satisfies Record<HarpSource, number>;
+  const order = [required, helpful].flatMap((harps) =>
+    [...harps].sort((a, b) => rank[sourceOf(a)] - rank[sourceOf(b)] || preferHarps(a, b)),
+  );
+  const able = (need: MeetingNeed): HarpId[] => order.map(harpId).filter((id) => need.optionIds.has(id));
+  const sole = new Set(
+    needs.flatMap((need) => {
+      const [first, second] = able(need);
+      return first && !second ? `${need.meeting.id} ${first}` : [];
+    }),
+  );
+  const served = new Map<HarpId, MeetingNeed[]>();
+  for (const need of needs) {
+    const ids = able(need);
+    const id = ids.find((each) => sole.has(`${need.meeting.id} ${each}`)) ?? ids[0];
+    if (id) served.set(id, [...(served.get(id) ?? []), need]);
+  }
+  return served;
+}
