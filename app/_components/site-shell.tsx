@@ -1,0 +1,17 @@
+import type { ReactNode } from 'react';
+import { SiteFoot } from '@/components/ui/site-foot';
+import { SiteHead } from '@/components/ui/site-head';
+import { getActor } from '@/lib/server/auth/get-actor';
+
+/** Head, main and foot round a page; the pages inside bring no `main` of their own. */
+export async function SiteShell({ children }: { children: ReactNode }) {
+  return (
+    <>
+      <SiteHead actor={await getActor()} />
+      <main id="main" tabIndex={-1} className="mx-auto max-w-page px-4 pt-8 outline-none sm:px-6 sm:pt-12">
+        {children}
+      </main>
+      <SiteFoot />
+    </>
+  );
+}

@@ -1,0 +1,60 @@
+import type { Route } from 'next';
+import Link from 'next/link';
+import type { Actor } from '@/lib/domain/access/actor';
+import { NavLink } from './nav-link';
+
+type SiteHeadProps = {
+  actor: Pick<Actor, 'user' | 'roles'>;
+  /** Ends the session; without it there is no button. */
+  signOut?: () => Promise<void>;
+};
+
+/** The board's top edge: name, the places one may go, and who one is. */
+export function SiteHead({ actor, signOut }: SiteHeadProps) {
+  const staff = actor.roles.length > 0;
+  const door = actor.roles.some(({ role }) => role === 'door' || role === 'organiser');
+  return (
+    <header className="no-print border-b-2 border-ink">
+      <div className="mx-auto flex max-w-page flex-wrap items-end justify-between gap-x-8 px-4 pt-3 sm:px-6">
+        <Link
+          href="/"
+          className="mb-2 inline-flex min-h-target items-center font-head text-h2 font-extrabold tracking-tight text-pine no-underline"
+        >
+          Combwood
+        </Link>
+        <nav
+          aria-label="Site"
+          className="order-3 -ml-1 flex w-full flex-wrap gap-x-5 sm:order-2 sm:ml-0 sm:w-auto"
+        >
+          <NavLink href="/" exact>
+            Camps
+          </NavLink>
+          <NavLink href={'/my' as Route}>My bookings</NavLink>
+          {staff && <NavLink href={'/organise' as Route}>Organise</NavLink>}
+          {door && <NavLink href={'/door' as Route}>Door</NavLink>}
+        </nav>
+        <div className="order-2 flex min-h-target flex-wrap items-center gap-x-4 sm:order-3 sm:ml-auto">
+          {actor.user ? (
+            <>
+              <NavLink href={'/account' as Route}>
+                <span className="max-w-[11rem] truncate">{actor.user.name}</span>
+              </NavLink>
+              {signOut && (
+                <form action={signOut}>
+                  <button
+                    type="submit"
+                    className="inline-flex min-h-target items-center px-1 text-lake underline underline-offset-4 hover:decoration-2"
+                  >
+                    Sign out
+                  </button>
+                </form>
+              )}
+            </>
+          ) : (
+            <NavLink href={'/sign-in' as Route}>Sign in</NavLink>
+          )}
+        </div>
+      </div>
+    </header>
+  );
+}
