@@ -1,0 +1,60 @@
+import type { Stripe } from 'stripe';
+import { letters, newId } from './new-id';
+import type { SessionRecord } from './records';
+
+export function buildIntent({ session, intentData }: SessionRecord, created: number): Stripe.PaymentIntent {
+  const id = newId('pi_');
+  return {
+    id,
+    object: 'payment_intent',
+    allowed_payment_method_types: null,
+    amount: session.amount_total ?? 0,
+    amount_capturable: 0,
+    amount_details: { tip: {} },
+    amount_received: 0,
+    application: null,
+    application_fee_amount: null,
+    automatic_payment_methods: null,
+    canceled_at: null,
+    cancellation_reason: null,
+    capture_method: 'automatic_async',
+    client_secret: `${id}_secret_${letters(25)}`,
+    confirmation_method: 'automatic',
+    created,
+    currency: session.currency ?? 'usd',
+    customer: null,
+    customer_account: null,
+    description: intentData.description ?? null,
+    excluded_payment_method_types: null,
+    last_payment_error: null,
+    latest_charge: null,
+    livemode: false,
+    managed_payments: null,
+    metadata: intentData.metadata,
+    next_action: null,
+    on_behalf_of: null,
+    payment_method: null,
+    payment_method_configuration_details: null,
+    payment_method_options: {
+      card: {
+        installments: null,
+        mandate_options: null,
+        network: null,
+        request_three_d_secure: 'automatic',
+      },
+    },
+    payment_method_types: ['card'],
+    payment_record: null,
+    processing: null,
+    receipt_email: intentData.receipt_email ?? null,
+    review: null,
+    setup_future_usage: null,
+    shipping: null,
+    source: null,
+    statement_descriptor: intentData.statement_descriptor ?? null,
+    statement_descriptor_suffix: intentData.statement_descriptor_suffix ?? null,
+    status: 'requires_payment_method',
+    transfer_data: null,
+    transfer_group: null,
+  } satisfies Stripe.PaymentIntent;
+}
