@@ -4,6 +4,7 @@ import Database from 'better-sqlite3';
 import { drizzle } from 'drizzle-orm/better-sqlite3';
 import * as account from './schema/account';
 import * as audit from './schema/audit';
+import * as background from './schema/background';
 import * as camp from './schema/camp';
 import * as door from './schema/door';
 import * as mail from './schema/mail';
@@ -15,6 +16,7 @@ import * as workshop from './schema/workshop';
 const schema = {
   ...account,
   ...audit,
+  ...background,
   ...camp,
   ...door,
   ...mail,

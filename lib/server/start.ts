@@ -1,5 +1,7 @@
 import 'server-only';
 import { migrateDatabase } from '@/db/migrate';
+import { listJobs } from './background/list-jobs';
+import { runBackground } from './background/run-background';
 import { getDb } from './db';
 import { env } from './env';
 import { log } from './log';
@@ -15,5 +17,6 @@ export function start(): void {
     process.exit(1);
   }
   markRequests();
+  runBackground(listJobs());
   log.info({ mode: env().COMBWOOD_MODE }, 'started');
 }
