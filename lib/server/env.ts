@@ -27,6 +27,15 @@ const shape = z.object({
   TICKET_SEED: z
     .string()
     .refine((text) => Buffer.from(text, 'base64url').length === 32, 'must be 32 bytes in base64url'),
+  /** Earlier seeds, parted by spaces: they sign nothing any more, but tickets that are out stay good. */
+  TICKET_OLD_SEEDS: z
+    .string()
+    .default('')
+    .transform((text) => text.split(/\s+/).filter(Boolean))
+    .refine(
+      (seeds) => seeds.every((seed) => Buffer.from(seed, 'base64url').length === 32),
+      'must be seeds of 32 bytes in base64url, parted by spaces',
+    ),
   STRIPE_SECRET_KEY: z.string().min(8, 'must be your Stripe secret key'),
   STRIPE_WEBHOOK_SECRET: z.string().min(8, 'must be the signing secret of the webhook'),
   /** Absent: Stripe itself. */
