@@ -1,4 +1,4 @@
-import { DEMO_PASSWORD, SIGN_INS } from './demo-sign-ins.mjs';
+import { DEMO_PASSWORD, SIGN_INS } from '../../db/seed/demo-sign-ins.mjs';
 import { ensureBuilt, ensureInstalled, ensureSeeded, places, stackEnv, startStack } from './stack.mjs';
 
 // `npm run demo` runs the production build; `npm run dev` is the same with reload. `--fresh` starts over.
