@@ -1,4 +1,4 @@
-import type { Harp } from '../harp/harp';
+import { type Harp, sameHarp } from '../harp/harp';
 import { harpId } from '../harp/harp-id';
 import { harpLabel } from '../harp/harp-label';
 import { listWords } from '../shared/list-words';
@@ -22,18 +22,15 @@ export function choiceReason(harp: Harp, source: HarpSource, served: readonly Me
   const label = harpLabel(harp);
   const open = served.filter(({ options }) => options.length > 1);
   if (open.length === 0) return null;
-  const fixed = served.filter(({ options }) => options.length === 1);
   const others = [
-    ...new Set(open.flatMap(({ options }) => options.filter((option) => harpId(option) !== harpId(harp)))),
-  ];
-  const instead = listWords([...new Set(others.map(harpLabel))], 'or', 4);
-  if (fixed.length > 0)
-    return `${label} is needed anyway on ${times(fixed)}, so it also serves ${times(open)}, where ${instead} would do.`;
-  if (source === 'owned')
-    return `You own ${label}, so it serves ${times(open)}, where ${instead} would do too.`;
-  if (source === 'loaner')
-    return `A loaner in ${label} is kept for you, so it serves ${times(open)}, where ${instead} would do too.`;
-  const meetings = new Set(open.map(({ meeting }) => meeting.id));
-  if (meetings.size > 1) return `Take ${label}: one harp serves ${times(open)}.`;
-  return `${label} or ${instead} will do on ${times(open)}: bring one of them.`;
+    ...new Map(open.flatMap(({ options }) => options).map((option) => [harpId(option), option])).values(),
+  ].filter((option) => !sameHarp(option, harp));
+  const instead = listWords(others.map(harpLabel), 'or', 4);
+  const serves = `it serves ${times(open)}, where ${instead} would do too`;
+  if (open.length < served.length) return `${label} is needed anyway, so ${serves}.`;
+  if (source === 'owned') return `You own ${label}, so ${serves}.`;
+  if (source === 'loaner') return `A loaner in ${label} is kept for you, so ${serves}.`;
+  const equals = others.filter((option) => open.every(({ optionIds }) => optionIds.has(harpId(option))));
+  if (equals.length === 0) return `Take ${label}: one harp serves ${times(open)}.`;
+  return `${label} or ${listWords(equals.map(harpLabel), 'or', 4)} will do: bring one of them.`;
 }
