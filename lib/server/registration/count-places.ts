@@ -3,17 +3,10 @@ import { and, count, eq, inArray } from 'drizzle-orm';
 import { camp, track } from '@/db/schema/camp';
 import { registration, registrationWorkshop } from '@/db/schema/order';
 import { workshop } from '@/db/schema/workshop';
+import type { CampPlaces, Places } from '@/lib/domain/camp/places';
 import { SEATED_STATES } from '@/lib/domain/registration/states';
-import type { CampId, TrackId, WorkshopId } from '@/lib/domain/shared/ids';
+import type { CampId } from '@/lib/domain/shared/ids';
 import { type Db, getDb, type Tx } from '../db';
-
-export type Places = { capacity: number; taken: number; left: number };
-export type CampPlaces = {
-  camp: Places;
-  tracks: { id: TrackId; places: Places }[];
-  /** Electives with a limit of their own; those without are left out. */
-  electives: { id: WorkshopId; places: Places }[];
-};
 
 const places = (capacity: number, taken: number): Places => ({
   capacity,
