@@ -34,6 +34,9 @@ const config = {
           { key: 'strict-transport-security', value: 'max-age=31536000; includeSubDomains' },
         ],
       },
+      // Pages seen while signed in leave the browser's cache with the session (ASVS 14.3.1). Not "storage": a door
+      // phone's unsent scans lie there, and any other site could lead a browser to this address.
+      { source: '/signed-out', headers: [{ key: 'clear-site-data', value: '"cache"' }] },
     ];
   },
   experimental: { authInterrupts: true, serverActions: { bodySizeLimit: '12mb' } },

@@ -6,7 +6,7 @@ import { NavLink } from './nav-link';
 type SiteHeadProps = {
   actor: Pick<Actor, 'user' | 'roles'>;
   /** Ends the session; without it there is no button. */
-  signOut?: () => Promise<void>;
+  signOut?: (form: FormData) => Promise<void>;
 };
 
 /** The board's top edge: name, the places one may go, and who one is. */

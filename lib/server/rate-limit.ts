@@ -1,14 +1,18 @@
 import 'server-only';
 import { createHash } from 'node:crypto';
 import { RateLimiterSQLite } from 'rate-limiter-flexible';
-import { getDb } from './db';
+import { type Db, getDb } from './db';
 import { env } from './env';
 import { log } from './log';
 
 /** Points a window in seconds, by what is asked for. Keys are an address or an account, never both in one bucket. */
 const BUDGETS = {
+  // Wrong tries only: right ones are given back, because a whole camp signs in from one address.
   'sign-in-address': { points: 30, seconds: 900 },
+  // By account and device, or account and address.
   'sign-in-account': { points: 8, seconds: 900 },
+  // By account, all devices together that never signed in to it: caps guessing from many addresses at once.
+  'sign-in-strangers': { points: 60, seconds: 3600 },
   'sign-up': { points: 12, seconds: 3600 },
   'mail-link': { points: 5, seconds: 3600 },
   draft: { points: 240, seconds: 600 },
@@ -22,7 +26,8 @@ const BUDGETS = {
 
 export type Budget = keyof typeof BUDGETS;
 
-const limiters = new Map<Budget, Promise<RateLimiterSQLite>>();
+// By connection, so that a test with a database of its own counts in that one.
+const limiters = new WeakMap<Db, Map<Budget, Promise<RateLimiterSQLite>>>();
 
 function open(budget: Budget): Promise<RateLimiterSQLite> {
   const { points, seconds } = BUDGETS[budget];
@@ -43,20 +48,31 @@ function open(budget: Budget): Promise<RateLimiterSQLite> {
   });
 }
 
-/** Takes one point; false when the budget is spent. Keys are hashed: the table holds no addresses or e-mails. */
+function limiterOf(budget: Budget): Promise<RateLimiterSQLite> {
+  const held = limiters.get(getDb()) ?? new Map<Budget, Promise<RateLimiterSQLite>>();
+  limiters.set(getDb(), held);
+  const limiter = held.get(budget) ?? open(budget);
+  held.set(budget, limiter);
+  return limiter;
+}
+
+/** Keys are hashed: the table holds no addresses or e-mails. */
+const keyOf = (text: string): string => createHash('sha256').update(text).digest('base64url').slice(0, 22);
+
+/** Takes one point; false when the budget is spent. */
 export async function spend(budget: Budget, key: string): Promise<boolean> {
-  let limiter = limiters.get(budget);
-  if (!limiter) {
-    limiter = open(budget);
-    limiters.set(budget, limiter);
-  }
-  const ready = await limiter;
+  const limiter = await limiterOf(budget);
   try {
-    await ready.consume(createHash('sha256').update(key).digest('base64url').slice(0, 22));
+    await limiter.consume(keyOf(key));
     return true;
   } catch (refusal) {
     if (refusal instanceof Error) throw refusal;
     log.warn({ budget }, 'rate limit reached');
     return false;
   }
+}
+
+/** Returns a point that turned out to be well spent. */
+export async function giveBack(budget: Budget, key: string): Promise<void> {
+  await (await limiterOf(budget)).reward(keyOf(key));
 }

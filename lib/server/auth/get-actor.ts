@@ -1,6 +1,16 @@
 import 'server-only';
+import { cookies } from 'next/headers';
 import { cache } from 'react';
-import { type Actor, VISITOR } from '@/lib/domain/access/actor';
+import type { Actor } from '@/lib/domain/access/actor';
+import { ORDERS_COOKIE } from './order-grants';
+import { readActor } from './read-actor';
+import { sessionCookieName } from './session-cookie';
 
-/** Who is asking, once a request. */
-export const getActor = cache(async (): Promise<Actor> => VISITOR);
+/** Who is asking, once a request. Works in pages, actions and route handlers; writes no cookie. */
+export const getActor = cache(async (): Promise<Actor> => {
+  const jar = await cookies();
+  return readActor(
+    { session: jar.get(sessionCookieName())?.value, orders: jar.get(ORDERS_COOKIE)?.value },
+    Date.now(),
+  );
+});
