@@ -3,7 +3,8 @@ import type { StaffRole } from './roles';
 /**
  * The one permission table. `on` is the kind of row that is touched; a staff permission holds when the person has one
  * of `roles` in the organisation that owns the row. `anyone` needs no sign-in, `signed-in` any account, `own` the
- * order's payer or attendee (by account, or by a link from their own mail).
+ * order's payer (by account, proven address, or a link from their own mail). On a registration, `own` is its attendee too:
+ * their ticket and packing list, never the order's money.
  */
 export const PERMISSIONS = {
   'public.read': { who: 'anyone' },
@@ -15,6 +16,7 @@ export const PERMISSIONS = {
   'organisation.create': { who: 'signed-in' },
   'order.read': { who: 'own', on: 'order' },
   'order.pay': { who: 'own', on: 'order' },
+  'registration.read': { who: 'own', on: 'registration' },
   'payment.notify': { who: 'provider' },
   'organisation.read': {
     who: 'staff',
@@ -38,7 +40,7 @@ export const PERMISSIONS = {
 
 export type PermissionRule =
   | { who: 'anyone' | 'signed-in' | 'provider' }
-  | { who: 'own'; on: 'order' }
+  | { who: 'own'; on: 'order' | 'registration' }
   | { who: 'staff'; on: 'organisation' | 'camp'; roles: readonly StaffRole[] };
 
 export type Permission = keyof typeof PERMISSIONS;

@@ -1,13 +1,13 @@
 import 'server-only';
 import { eq } from 'drizzle-orm';
 import { camp } from '@/db/schema/camp';
-import { order } from '@/db/schema/order';
+import { order, registration } from '@/db/schema/order';
 import { organisation } from '@/db/schema/organisation';
 import type { Target } from '@/lib/domain/access/can';
 import { isId } from '@/lib/domain/shared/ids';
 import { getDb } from '../db';
 
-export type TargetKind = 'organisation' | 'camp' | 'order';
+export type TargetKind = 'organisation' | 'camp' | 'order' | 'registration';
 
 /** The row a permission is asked on, or null where the id is malformed or names nothing. */
 export function findTarget(kind: TargetKind, id: string): Target {
@@ -29,6 +29,20 @@ export function findTarget(kind: TargetKind, id: string): Target {
       .select({ orderId: order.id, payerUserId: order.payerUserId, payerEmail: order.payerEmail })
       .from(order)
       .where(eq(order.id, id))
+      .get();
+    return row ?? null;
+  }
+  if (kind === 'registration' && isId('reg', id)) {
+    const row = db
+      .select({
+        registrationId: registration.id,
+        attendeeUserId: registration.attendeeUserId,
+        attendeeEmail: registration.attendeeEmail,
+        order: { orderId: order.id, payerUserId: order.payerUserId, payerEmail: order.payerEmail },
+      })
+      .from(registration)
+      .innerJoin(order, eq(order.id, registration.orderId))
+      .where(eq(registration.id, id))
       .get();
     return row ?? null;
   }
