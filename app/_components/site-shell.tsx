@@ -10,14 +10,21 @@ async function signOut(form: FormData): Promise<void> {
   await signOutAction(null, form);
 }
 
-/** Head, main and foot round a page; the pages inside bring no `main` of their own. */
-export async function SiteShell({ children }: { children: ReactNode }) {
+/**
+ * Head, main and foot round a page; the pages inside bring no `main` of their own. `work` pages take the whole width
+ * and do bring one, beside their rail.
+ */
+export async function SiteShell({ children, work = false }: { children: ReactNode; work?: boolean }) {
   return (
     <>
-      <SiteHead actor={await getActor()} signOut={signOut} />
-      <main id="main" tabIndex={-1} className="mx-auto max-w-page px-4 pt-8 outline-none sm:px-6 sm:pt-12">
-        {children}
-      </main>
+      <SiteHead actor={await getActor()} wide={work} signOut={signOut} />
+      {work ? (
+        children
+      ) : (
+        <main id="main" tabIndex={-1} className="mx-auto max-w-page px-4 pt-8 outline-none sm:px-6 sm:pt-12">
+          {children}
+        </main>
+      )}
       <SiteFoot />
     </>
   );

@@ -5,17 +5,21 @@ import { NavLink } from './nav-link';
 
 type SiteHeadProps = {
   actor: Pick<Actor, 'user' | 'roles'>;
+  /** As wide as the window, as work pages are. */
+  wide?: boolean;
   /** Ends the session; without it there is no button. */
   signOut?: (form: FormData) => Promise<void>;
 };
 
 /** The board's top edge: name, the places one may go, and who one is. */
-export function SiteHead({ actor, signOut }: SiteHeadProps) {
+export function SiteHead({ actor, wide = false, signOut }: SiteHeadProps) {
   const staff = actor.roles.length > 0;
   const door = actor.roles.some(({ role }) => role === 'door' || role === 'organiser');
   return (
     <header className="no-print border-b-2 border-ink">
-      <div className="mx-auto flex max-w-page flex-wrap items-end justify-between gap-x-8 px-4 pt-3 sm:px-6">
+      <div
+        className={`mx-auto flex flex-wrap items-end justify-between gap-x-8 px-4 pt-3 sm:px-6 ${wide ? '' : 'max-w-page'}`}
+      >
         <Link
           href="/"
           className="mb-2 inline-flex min-h-target items-center font-head text-h2 font-extrabold tracking-tight text-pine no-underline"
