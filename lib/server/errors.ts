@@ -17,6 +17,32 @@ export const ERRORS = {
       'Someone changed this since you opened it. Load the page again to see their version; your text is still here to copy.',
   },
   too_large: { status: 413, sentence: 'That is too large to take. The limit is 10 MB.' },
+  camp_full: {
+    status: 409,
+    sentence:
+      'The last place went while you were answering. Write to the organisers to hear if one comes free.',
+  },
+  track_full: {
+    status: 409,
+    sentence: 'This track filled up while you were answering. Choose another; your answers are kept.',
+  },
+  elective_full: {
+    status: 409,
+    sentence:
+      'An elective filled up while you were answering. Take it out or swap it; your answers are kept.',
+  },
+  camp_closed: { status: 409, sentence: 'Registration for this camp is closed.' },
+  hold_over: {
+    status: 409,
+    sentence:
+      'The time for paying ran out and the place went back. Your answers are kept: try again with them.',
+  },
+  not_payable: { status: 409, sentence: 'There is nothing to pay on this order any more.' },
+  payment_down: {
+    status: 503,
+    sentence:
+      'The payment service does not answer just now. Your place stays held; press Pay again in a minute.',
+  },
   unavailable: {
     status: 503,
     sentence: 'This does not answer just now. Nothing was lost; try again in a minute.',

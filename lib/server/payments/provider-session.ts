@@ -1,0 +1,35 @@
+import 'server-only';
+import type Stripe from 'stripe';
+
+/** A Checkout Session cut down to what decides. */
+export type ProviderSession = {
+  id: string;
+  /** waiting: the form is through, the money not yet (slow payment methods). */
+  state: 'open' | 'waiting' | 'paid' | 'expired';
+  amount: number | null;
+  /** ISO 4217 in capitals, as our tables have it. */
+  currency: string | null;
+  orderId: string;
+  paymentId: string;
+  intentId: string | null;
+  url: string | null;
+};
+
+export function toProviderSession(session: Stripe.Checkout.Session): ProviderSession {
+  const { payment_intent: intent } = session;
+  return {
+    id: session.id,
+    state: sessionState(session),
+    amount: session.amount_total,
+    currency: session.currency?.toUpperCase() ?? null,
+    orderId: session.metadata?.orderId ?? '',
+    paymentId: session.metadata?.paymentId ?? '',
+    intentId: typeof intent === 'string' ? intent : (intent?.id ?? null),
+    url: session.url,
+  };
+}
+
+function sessionState(session: Stripe.Checkout.Session): ProviderSession['state'] {
+  if (session.status === 'complete') return session.payment_status === 'unpaid' ? 'waiting' : 'paid';
+  return session.status === 'expired' ? 'expired' : 'open';
+}
