@@ -93,6 +93,7 @@ export function stackEnv(port, folder) {
     STRIPE_API_URL: at.pay,
     STRIPE_MOCK_PORT: String(at.ports.pay),
     STRIPE_MOCK_URL: at.pay,
+    STRIPE_MOCK_MERCHANT: DEMO_SECRETS.MAIL_FROM_NAME,
     STRIPE_MOCK_WEBHOOK_URL: `${at.app}/api/stripe/webhook`,
     STRIPE_MOCK_WEBHOOK_SECRET: DEMO_SECRETS.STRIPE_WEBHOOK_SECRET,
     STRIPE_MOCK_STATE: resolve(ROOT, folder, 'stripe-mock.json'),

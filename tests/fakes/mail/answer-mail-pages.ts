@@ -9,11 +9,17 @@ function goTo(res: ServerResponse, location: string): void {
   res.writeHead(303, { location }).end();
 }
 
-async function oneMessage({ mailbox, url }: Mail, res: ServerResponse, id: string, what: string | undefined) {
+async function oneMessage(
+  { mailbox }: Mail,
+  res: ServerResponse,
+  origin: string,
+  id: string,
+  what: string | undefined,
+) {
   const opened = await readMessage(mailbox, id);
   if (!opened) sendPage(res, 404, missingPage);
   else if (what === undefined) sendPage(res, 200, messagePage(opened.message));
-  else if (what === 'body') sendBody(res, opened.message, url);
+  else if (what === 'body') sendBody(res, opened.message, origin);
   else if (what === 'raw')
     sendPage(res, 200, rawPage(opened.message, mailbox.raw(id)?.toString('utf8') ?? ''));
   else sendPage(res, 404, missingPage);
@@ -39,6 +45,8 @@ export async function answerMailPages(
   else if (first === 'messages' && isPost && what === 'delete') {
     mailbox.remove(id);
     goTo(res, '/');
-  } else if (first === 'messages' && !isPost) await oneMessage(mail, res, id, what);
-  else sendPage(res, 404, missingPage);
+  } else if (first === 'messages' && !isPost) {
+    // As the reader typed it: localhost and 127.0.0.1 are two origins. The guard has let only loopback names in.
+    await oneMessage(mail, res, `http://${req.headers.host}`, id, what);
+  } else sendPage(res, 404, missingPage);
 }

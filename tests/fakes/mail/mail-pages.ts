@@ -49,7 +49,7 @@ export function listPage(messages: MessageSummary[], to: string, total: number):
 <button class="main">Find</button>${to ? html`<a class="button" href="/">Show all</a>` : null}</form>
 <p class="soft" role="status">${messages.length} of ${total} ${total === 1 ? 'message' : 'messages'}${messages.length > SHOWN ? `, the newest ${SHOWN} shown` : ''}</p>
 ${messages.length === 0 ? none : table(messages.slice(0, SHOWN))}
-${total > 0 ? html`<p></p><p><a class="button" href="/delete">Delete all…</a></p>` : null}`,
+${total > 0 ? html`<p class="after"><a class="button" href="/delete">Delete all…</a></p>` : null}`,
   );
 }
 

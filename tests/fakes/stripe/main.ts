@@ -6,6 +6,7 @@ import { startStripeMock } from './start-stripe-mock';
 const settings = readSettings(
   z.object({
     STRIPE_MOCK_PORT: portSetting(4242),
+    STRIPE_MOCK_URL: z.url().optional(),
     STRIPE_MOCK_WEBHOOK_URL: z.url().optional(),
     STRIPE_MOCK_WEBHOOK_SECRET: z.string().startsWith('whsec_').optional(),
     STRIPE_MOCK_STATE: z.string().min(1).optional(),
@@ -19,6 +20,7 @@ const mock = await startStripeMock({
   webhookUrl: settings.STRIPE_MOCK_WEBHOOK_URL,
   webhookSecret: settings.STRIPE_MOCK_WEBHOOK_SECRET,
   stateFile: settings.STRIPE_MOCK_STATE,
+  publicUrl: settings.STRIPE_MOCK_URL,
   merchant: settings.STRIPE_MOCK_MERCHANT,
 }).catch((error: unknown) => {
   console.error(`stripe-mock: ${error instanceof Error ? error.message : String(error)}`);

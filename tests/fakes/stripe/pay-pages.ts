@@ -80,8 +80,7 @@ ${lines(view)}
 ${payer(view)}
 ${choices(view)}
 </form>
-<p></p>
-<div class="row">${walkAway}</div>`,
+<div class="row after">${walkAway}</div>`,
   );
 }
 
@@ -96,7 +95,7 @@ export function confirmPage({ record, merchant }: PayView): Page {
 <button class="main" name="outcome" value="approve">Yes, confirm the payment</button>
 <button name="outcome" value="refuse">No, refuse it</button>
 </div></form>
-<p></p><p><a href="/pay/${id}">Back to the payment page</a></p>`,
+<p class="after"><a href="/pay/${id}">Back to the payment page</a></p>`,
   );
 }
 
@@ -107,7 +106,7 @@ export function completePage(view: PayView): Page {
     html`<h1>${paid ? 'Already paid' : 'Already finished'}</h1>
 <div class="panel said done"><p>${paid ? html`<strong class="mono">${total(view.record)}</strong> went to ${view.merchant}. Nothing more to pay here.` : 'There was nothing to pay.'}</p></div>
 ${lines(view)}
-<p></p><p><a class="button main" href="${successUrl(view.record)}">Go on to ${view.merchant}</a></p>`,
+<p class="after"><a class="button main" href="${successUrl(view.record)}">Go on to ${view.merchant}</a></p>`,
   );
 }
 

@@ -21,6 +21,8 @@ export type StripeMockOptions = {
   /** Keeps state across restarts; without it everything is forgotten at the end. */
   stateFile?: string;
   merchant?: string;
+  /** The address that people open, where it differs from http://127.0.0.1:<port>. */
+  publicUrl?: string;
   now?: () => number;
 };
 
@@ -73,7 +75,8 @@ export async function startStripeMock(options: StripeMockOptions): Promise<Strip
     });
   });
   const port = await listenLocally(server, options.port);
-  mock.baseUrl = `http://127.0.0.1:${port}`;
+  const url = `http://127.0.0.1:${port}`;
+  mock.baseUrl = options.publicUrl?.replace(/\/$/, '') ?? url;
   const timer = setInterval(() => expireDue(mock), 1000);
   expireDue(mock);
   const close = async () => {
@@ -81,5 +84,5 @@ export async function startStripeMock(options: StripeMockOptions): Promise<Strip
     webhooks.close();
     await closeServer(server);
   };
-  return { url: mock.baseUrl, port, close };
+  return { url, port, close };
 }

@@ -1,9 +1,13 @@
-/** Ctrl-C or a stop from the parent closes tidily once; a second signal ends at once. */
+/**
+ * Ctrl-C or a stop from the parent closes tidily. A signal to the process group often comes twice (a wrapper passes it
+ * on), so repeats are ignored; what is not closed within three seconds is left.
+ */
 export function endOnSignal(close: () => Promise<void>): void {
   let closing = false;
   const end = () => {
-    if (closing) process.exit(1);
+    if (closing) return;
     closing = true;
+    setTimeout(() => process.exit(1), 3000).unref();
     close().then(
       () => process.exit(0),
       (error) => {

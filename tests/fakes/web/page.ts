@@ -26,7 +26,7 @@ function document({ title, notice, width, body }: Page): string {
 </head>
 <body>
 <a class="skip" href="#main">Skip to the page</a>
-<header class="notice"><p>${notice}</p></header>
+<header class="notice ${width}"><p>${notice}</p></header>
 <main id="main" class="sheet ${width}">
 ${body}
 </main>

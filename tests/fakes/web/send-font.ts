@@ -3,13 +3,15 @@ import type { ServerResponse } from 'node:http';
 import { createRequire } from 'node:module';
 
 const require = createRequire(import.meta.url);
+const font = (family: string, subset: string) =>
+  `@fontsource-variable/${family}/files/${family}-${subset}-wght-normal.woff2`;
 const files: Record<string, string> = {
-  '/_look/head.woff2':
-    '@fontsource-variable/bricolage-grotesque/files/bricolage-grotesque-latin-wght-normal.woff2',
-  '/_look/body.woff2':
-    '@fontsource-variable/atkinson-hyperlegible-next/files/atkinson-hyperlegible-next-latin-wght-normal.woff2',
-  '/_look/mono.woff2':
-    '@fontsource-variable/atkinson-hyperlegible-mono/files/atkinson-hyperlegible-mono-latin-wght-normal.woff2',
+  '/_look/head.woff2': font('bricolage-grotesque', 'latin'),
+  '/_look/head-ext.woff2': font('bricolage-grotesque', 'latin-ext'),
+  '/_look/body.woff2': font('atkinson-hyperlegible-next', 'latin'),
+  '/_look/body-ext.woff2': font('atkinson-hyperlegible-next', 'latin-ext'),
+  '/_look/mono.woff2': font('atkinson-hyperlegible-mono', 'latin'),
+  '/_look/mono-ext.woff2': font('atkinson-hyperlegible-mono', 'latin-ext'),
 };
 
 /** Serves the app's own three fonts; false when the path is not one of them. */

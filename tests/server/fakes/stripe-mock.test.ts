@@ -1,4 +1,4 @@
-import Stripe from 'stripe';
+import type Stripe from 'stripe';
 import { afterAll, beforeAll, beforeEach, describe, expect, test, vi } from 'vitest';
 import { type StripeMock, startStripeMock } from '@/tests/fakes/stripe/start-stripe-mock';
 import { publishedProblems, requiredFields } from './published-shape';
@@ -452,12 +452,10 @@ describe('faults', () => {
   );
 });
 
-test('a page of another site and a foreign host name are kept out', async () => {
+test('a page of another site is kept out', async () => {
   const foreign = await fetch(`${mock.url}/_mock/reset`, {
     method: 'POST',
     headers: { origin: 'http://evil.example' },
   });
   expect(foreign.status).toBe(403);
-  const signed = Stripe.webhooks.generateTestHeaderString({ payload: '{}', secret: webhookSecret });
-  expect(Stripe.webhooks.constructEvent('{}', signed, webhookSecret)).toEqual({});
 });
