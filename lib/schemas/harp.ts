@@ -58,7 +58,10 @@ export const songKeySchema = z
 export const positionSchema = z.preprocess(
   (input) => (typeof input === 'string' && /^\s*\d+\s*$/.test(input) ? Number(input) : input),
   z.literal(POSITIONS, {
-    error: ({ input }) => `${shown(input)} is not a position. Use a number from 1 to 12.`,
+    error: ({ input }) =>
+      input === undefined || input === ''
+        ? 'Choose a position from 1 to 12.'
+        : `${shown(input)} is not a position. Use a number from 1 to 12.`,
   }),
 );
 

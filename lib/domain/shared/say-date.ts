@@ -2,17 +2,30 @@ import { Temporal } from 'temporal-polyfill';
 
 const LOCALE = 'en-GB';
 
+// Made once: a formatter costs a hundred times what it formats, and lists say many days.
+const LONG_DAY = new Intl.DateTimeFormat(LOCALE, {
+  weekday: 'long',
+  day: 'numeric',
+  month: 'long',
+  year: 'numeric',
+  timeZone: 'UTC',
+});
+const SHORT_DAY = new Intl.DateTimeFormat(LOCALE, {
+  weekday: 'short',
+  day: 'numeric',
+  month: 'long',
+  timeZone: 'UTC',
+});
+
+/** A calendar day has no zone: read and said in UTC it stays the same day everywhere. Throws when it is no day. */
+const say = (format: Intl.DateTimeFormat, day: string): string =>
+  format.format(new Date(`${day}T00:00:00Z`)).replace(',', '');
+
 /** "Friday 5 June 2026". */
-export const sayDay = (day: string): string =>
-  Temporal.PlainDate.from(day)
-    .toLocaleString(LOCALE, { weekday: 'long', day: 'numeric', month: 'long', year: 'numeric' })
-    .replace(',', '');
+export const sayDay = (day: string): string => say(LONG_DAY, day);
 
 /** "Fri 5 June". */
-export const sayShortDay = (day: string): string =>
-  Temporal.PlainDate.from(day)
-    .toLocaleString(LOCALE, { weekday: 'short', day: 'numeric', month: 'long' })
-    .replace(',', '');
+export const sayShortDay = (day: string): string => say(SHORT_DAY, day);
 
 /** "5–9 June 2026", "30 May – 3 June 2026". */
 export function sayDays(first: string, last: string): string {
