@@ -49,7 +49,7 @@ export const VERDICT_WORDS = {
   already: {
     word: 'Already in',
     shape: 'ring',
-    next: 'This ticket has been used. Ask their name if in doubt.',
+    next: 'They came in before. Ask their name if in doubt.',
   },
   'other-camp': { word: 'Other camp', shape: 'cross', next: 'The ticket is real, but for another camp.' },
   cancelled: {

@@ -19,15 +19,15 @@ export default async function DoorPage({ params }: PageProps<'/door/[campId]'>) 
   const { confirmed, arrived } = countArrivals(campId);
 
   return (
-    <main id="main" className="mx-auto w-full max-w-xl px-4 py-6">
+    <>
       <p className="text-small text-soft">{sayDays(camp.startsOn, camp.endsOn)}</p>
-      <h1 className="mb-4">Door: {camp.name}</h1>
+      <h1 className="mb-3 text-h2">{camp.name}</h1>
       <noscript>
         <Notice tone="stop" title="The door needs JavaScript">
           Scanning and marking arrivals run in the browser. Switch JavaScript on for this page.
         </Notice>
       </noscript>
       <DoorDesk campId={campId} confirmed={confirmed} arrived={arrived} />
-    </main>
+    </>
   );
 }
