@@ -1,9 +1,9 @@
 import { askSentence } from '../harp/ask-sentence';
-import { compareHarps } from '../harp/compare-harps';
 import type { Harp } from '../harp/harp';
 import { type HarpNeed, isAnyKey } from '../harp/harp-ask';
 import { harpFromAsk } from '../harp/harp-from-ask';
 import { type HarpId, harpId } from '../harp/harp-id';
+import { needHarps } from '../harp/need-harps';
 import { compareText } from '../shared/compare-text';
 import { compareMeetings, type PackingMeeting } from './packing-meeting';
 
@@ -30,20 +30,15 @@ export function listMeetingNeeds(meetings: readonly PackingMeeting[]): MeetingNe
       meeting.needs
         .filter((need) => !isAnyKey(need))
         .map((need): MeetingNeed => {
-          const byId = new Map(need.anyOf.map(harpFromAsk).map((harp) => [harpId(harp), harp]));
-          return {
-            meeting,
-            need,
-            options: [...byId.values()].sort(compareHarps),
-            optionIds: new Set(byId.keys()),
-          };
+          const options = needHarps(need);
+          return { meeting, need, options, optionIds: new Set(options.map(harpId)) };
         }),
     )
     .sort((a, b) => compareMeetings(a.meeting, b.meeting) || compareText(text(a), text(b)));
 }
 
 /** How a need came to this harp. The song is told where there is one; two ways to the same harp are both told. */
-export function needSentence({ need }: MeetingNeed, harp: Harp): string {
+export function harpSentence({ need }: MeetingNeed, harp: Harp): string {
   const asks = need.anyOf.filter((ask) => harpId(harpFromAsk(ask)) === harpId(harp));
   const songs = asks.filter((ask) => ask.by === 'song');
   return [...new Set((songs.length > 0 ? songs : asks).map(askSentence))].sort().join('; ');

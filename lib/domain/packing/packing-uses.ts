@@ -1,7 +1,7 @@
 import type { Harp } from '../harp/harp';
 import { harpId } from '../harp/harp-id';
 import { harpLabel } from '../harp/harp-label';
-import { type MeetingNeed, needSentence } from './meeting-need';
+import { harpSentence, type MeetingNeed } from './meeting-need';
 import type { PackingUse } from './packing-list';
 
 /** The same thing said twice for one meeting is one use, and a required one if either was. */
@@ -9,7 +9,7 @@ export function packingUses(harp: Harp, served: readonly MeetingNeed[]): Packing
   const found = new Map<string, PackingUse>();
   for (const each of served) {
     const { id: meetingId, workshop, day, starts, ends, room } = each.meeting;
-    const sentence = needSentence(each, harp);
+    const sentence = harpSentence(each, harp);
     const note = each.need.note ?? '';
     const key = `${meetingId} ${sentence} ${note}`;
     const others = each.options.filter((option) => harpId(option) !== harpId(harp)).map(harpLabel);

@@ -7,6 +7,8 @@ import type { Harp } from '@/lib/domain/harp/harp';
 import { harpId, parseHarpId } from '@/lib/domain/harp/harp-id';
 import { harpFromLabel, harpLabel } from '@/lib/domain/harp/harp-label';
 import { holeOneMidi } from '@/lib/domain/harp/hole-one';
+import { needHarps } from '@/lib/domain/harp/need-harps';
+import { needSentence } from '@/lib/domain/harp/need-sentence';
 import { parseHarpLabel } from '@/lib/domain/harp/parse-harp-label';
 import { parsePitchClass } from '@/lib/domain/harp/parse-pitch-class';
 import { PITCH_CLASSES } from '@/lib/domain/harp/pitch-class';
@@ -174,6 +176,18 @@ describe('sentences', () => {
 
   test('a harp named by its key', () => {
     expect(askSentence({ by: 'harp', labelKey: 'F', tuning: 'richter', register: 'low' })).toBe('Low F harp');
+  });
+
+  test('a need names its alternatives, its level and its note; its harps are each once, low to high', () => {
+    const e2 = { by: 'song', songKey: { tonic: 'E', minor: false }, position: 2, ...usual } as const;
+    const a = { by: 'harp', labelKey: 'A', ...usual } as const;
+    const g = { by: 'harp', labelKey: 'G', ...usual } as const;
+    expect(needSentence({ level: 'helpful', anyOf: [e2, g], note: 'for the duet' })).toBe(
+      'song in E, 2nd position → A harp or G harp (helpful): for the duet',
+    );
+    expect(needSentence({ level: 'required', anyOf: [] })).toBe('a harp of any key');
+    expect(needHarps({ anyOf: [e2, a, g] }).map(harpLabel)).toEqual(['G', 'A']);
+    expect(needHarps({ anyOf: [] })).toEqual([]);
   });
 
   test('for the ear', () => {
