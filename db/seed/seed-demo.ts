@@ -3,12 +3,16 @@ import type { Db } from '@/db/client';
 import { user } from '@/db/schema/account';
 import { membership, organisation } from '@/db/schema/organisation';
 import type { StaffRole } from '@/lib/domain/access/roles';
+import type { RegistrationState } from '@/lib/domain/registration/states';
 import type { Id, OrganisationId, UserId } from '@/lib/domain/shared/ids';
 import { localDay } from '@/lib/domain/shared/local-time';
 import { minor } from '@/lib/domain/shared/money';
 import { hashPassword } from '@/lib/server/auth/hash-password';
 import { DEMO_PASSWORD, SIGN_INS } from './demo-sign-ins.mjs';
+import { demoNames } from './people-names';
 import { seedCamp } from './seed-camp';
+import { seedArrivals, seedPastArrivals, seedRegistrations, settleMail } from './seed-registrations';
+import { seededRandom } from './seeded-random';
 
 const DAY = 24 * 3_600_000;
 const ZONE = 'Europe/Berlin';
@@ -42,7 +46,7 @@ export async function seedDemo(db: Db, now: number): Promise<void> {
     instructorUserId: people.instructor,
     now,
   };
-  seedCamp(db, {
+  const selling = seedCamp(db, {
     ...common,
     code: 'a',
     slug: 'kettle-lake-harp-week',
@@ -54,7 +58,7 @@ export async function seedDemo(db: Db, now: number): Promise<void> {
     price: minor(46_000),
     state: 'published',
   });
-  seedCamp(db, {
+  const arriving = seedCamp(db, {
     ...common,
     code: 'b',
     slug: 'slate-ridge-harp-days',
@@ -66,7 +70,7 @@ export async function seedDemo(db: Db, now: number): Promise<void> {
     price: minor(38_000),
     state: 'published',
   });
-  seedCamp(db, {
+  const past = seedCamp(db, {
     ...common,
     code: 'c',
     slug: 'kettle-lake-harp-week-last-year',
@@ -78,7 +82,60 @@ export async function seedDemo(db: Db, now: number): Promise<void> {
     price: minor(43_000),
     state: 'closed',
   });
+  const names = demoNames(240);
+  const random = seededRandom(1857);
+  // Oskar, the first name, is the attendee who can sign in.
+  const shared = { heirs: names.slice(230), accounts: new Map([[0, people.attendee]]), random, now };
+  const lastYear = now - 290 * DAY;
+  seedRegistrations(db, {
+    ...shared,
+    camp: past,
+    names: names.slice(0, 88),
+    fates: fates({ cancelled: [5, 40], expired: [11] }),
+    from: lastYear - 150 * DAY,
+    to: lastYear - 20 * DAY,
+    code: 'c',
+  });
+  settleMail(db, '', now);
+  seedPastArrivals(db, past, lastYear + 5 * DAY);
+  const people140 = seedRegistrations(db, {
+    ...shared,
+    camp: arriving,
+    names: names.slice(0, 140),
+    fates: fates(TODAY),
+    from: now - 120 * DAY,
+    to: now - 2 * DAY,
+    code: 'b',
+  });
+  seedArrivals({ camp: arriving, people: people140.slice(20, 52), by: people.door, now });
+  seedRegistrations(db, {
+    ...shared,
+    camp: selling,
+    names: [...names.slice(0, 1), ...names.slice(140, 199)],
+    fates: fates({ held: [57, 59], expired: [22, 31], cancelled: [18] }),
+    from: now - 60 * DAY,
+    to: now - DAY,
+    code: 'a',
+  });
+  settleMail(db, 'oskar@players.example', now);
 }
+
+/** Who of today's camp is not simply confirmed; indexes into its list of people. */
+const TODAY = {
+  held: [131, 136],
+  waitlisted: [133, 137, 139],
+  offered: [138],
+  cancelled: [14, 33, 71, 96, 118],
+  transferred: [60, 101],
+  expired: [17, 45, 84, 110],
+} satisfies Partial<Record<RegistrationState, number[]>>;
+
+const fates = (of: Partial<Record<RegistrationState, number[]>>): Map<number, RegistrationState> =>
+  new Map(
+    Object.entries(of).flatMap(([state, indexes]) =>
+      indexes.map((index) => [index, state as RegistrationState]),
+    ),
+  );
 
 async function seedPeople(
   db: Db,

@@ -6,7 +6,7 @@ import type { Tx } from '../db';
 import { newId } from '../new-id';
 
 /** The reasons a posting can have; with its cause each is written once (a unique index refuses a second). */
-export type LedgerMemo = 'Place sold' | 'Paid by card' | 'Refund' | 'Refund came back';
+export type LedgerMemo = 'Place sold' | 'Place given up' | 'Paid by card' | 'Refund' | 'Refund came back';
 
 /** Writes one posting; its amounts (debit positive) must sum to zero. A posting of nothing is not written. */
 export function postLedger(
