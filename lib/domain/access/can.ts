@@ -38,6 +38,7 @@ function ownsOrder(actor: Actor, order: OrderTarget): boolean {
 }
 
 const attends = (actor: Actor, registration: RegistrationTarget): boolean =>
+  actor.registrations.includes(registration.registrationId) ||
   isPerson(actor, registration.attendeeUserId, registration.attendeeEmail);
 
 /** By account, or by an address that the account has proven. */

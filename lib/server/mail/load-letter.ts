@@ -1,0 +1,25 @@
+import 'server-only';
+import type { MailKind } from '@/db/schema/mail';
+import type { MailRow } from './lease-mail';
+import type { Letter, LoadLetter } from './letter';
+import { loadInvite } from './letters/invite';
+import { loadKnownAddress } from './letters/known-address';
+import { loadLatePayment } from './letters/late-payment';
+import { loadOrderConfirmed } from './letters/order-confirmed';
+import { loadPackingList } from './letters/packing-list';
+import { loadReset } from './letters/reset';
+import { loadVerify } from './letters/verify';
+
+/** Who writes which letter. */
+const LOADERS: Record<MailKind, LoadLetter> = {
+  verify: loadVerify,
+  'known-address': loadKnownAddress,
+  reset: loadReset,
+  invite: loadInvite,
+  'order-confirmed': loadOrderConfirmed,
+  'packing-list': loadPackingList,
+  'late-payment': loadLatePayment,
+};
+
+export const loadLetter = async (row: MailRow, now: number): Promise<Letter> =>
+  LOADERS[row.kind]({ payload: row.payload, toName: row.toName, now });
