@@ -14,6 +14,8 @@ const config = {
     'sharp',
     '@node-rs/argon2',
     '@react-pdf/renderer',
+    '@react-email/components',
+    '@react-email/render',
     'rate-limiter-flexible',
   ],
   // The content security policy needs a nonce a request and comes from proxy.ts; these are the same for every answer.
