@@ -40,6 +40,7 @@ export default {
         h3: ['1.294rem', '1.25'],
         h2: ['1.647rem', '1.15'],
         h1: ['2.235rem', '1.05'],
+        bill: ['clamp(2.1rem, 4.6vw, 3.4rem)', '0.98'],
         poster: ['clamp(2.6rem, 7vw, 5.2rem)', '0.95'],
       },
       minHeight: { target: '44px' },

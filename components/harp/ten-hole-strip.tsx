@@ -1,4 +1,5 @@
 import type { HoleNotes } from '@/lib/domain/harp/note-map';
+import { filledHoles, HOLES } from './filled-holes';
 import type { Sounding } from './note-column';
 import { NoteMap } from './note-map';
 import { type HoleLook, StripHoles } from './strip-holes';
@@ -9,18 +10,6 @@ export type TenHoleStripProps = { className?: string } & (
   | { mode: 'mark' /** Left out where the name stands beside it. */; label?: string }
   | { mode: 'notes' /** "A", "Low F". */; label: string; holes: readonly HoleNotes[]; sounding?: Sounding }
 );
-
-const HOLES = 10;
-
-/**
- * Holes filled when so many places are gone: the first place sold shows, and the last hole fills only with the last
- * place. Nothing to sell is a full strip.
- */
-export function filledHoles(left: number, of: number): number {
-  if (of <= 0 || left <= 0) return HOLES;
-  if (left >= of) return 0;
-  return Math.min(HOLES - 1, Math.max(1, Math.floor(((of - left) / of) * HOLES)));
-}
 
 const row = (count: number, look: (hole: number) => HoleLook): HoleLook[] =>
   Array.from({ length: count }, (_, index) => look(index + 1));

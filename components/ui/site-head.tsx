@@ -1,6 +1,7 @@
 import type { Route } from 'next';
 import Link from 'next/link';
 import type { Actor } from '@/lib/domain/access/actor';
+import { TenHoleStrip } from '../harp/ten-hole-strip';
 import { NavLink } from './nav-link';
 
 type SiteHeadProps = {
@@ -22,9 +23,10 @@ export function SiteHead({ actor, wide = false, signOut }: SiteHeadProps) {
       >
         <Link
           href="/"
-          className="mb-2 inline-flex min-h-target items-center font-head text-h2 font-extrabold tracking-tight text-pine no-underline"
+          className="mb-2.5 inline-block pt-0.5 font-head text-[1.75rem] font-extrabold leading-none tracking-tight text-pine no-underline"
         >
           Combwood
+          <TenHoleStrip mode="mark" className="mt-1 w-[7.9rem]" />
         </Link>
         <nav
           aria-label="Site"
