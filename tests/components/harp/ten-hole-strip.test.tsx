@@ -1,7 +1,8 @@
 import fc from 'fast-check';
 import { renderToStaticMarkup } from 'react-dom/server';
 import { describe, expect, test } from 'vitest';
-import { filledHoles, TenHoleStrip } from '@/components/harp/ten-hole-strip';
+import { filledHoles } from '@/components/harp/filled-holes';
+import { TenHoleStrip } from '@/components/harp/ten-hole-strip';
 import { noteMap } from '@/lib/domain/harp/note-map';
 import { parseHarpLabel } from '@/lib/domain/harp/parse-harp-label';
 
