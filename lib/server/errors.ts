@@ -16,6 +16,11 @@ export const ERRORS = {
     sentence:
       'Someone changed this since you opened it. Load the page again to see their version; your text is still here to copy.',
   },
+  not_ready: {
+    status: 409,
+    sentence: 'Something is still missing for this. Look at the list and mend it first.',
+  },
+  in_use: { status: 409, sentence: 'Something else still uses this. Change that first.' },
   too_large: { status: 413, sentence: 'That is too large to take. The limit is 10 MB.' },
   camp_full: {
     status: 409,

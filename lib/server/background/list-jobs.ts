@@ -1,5 +1,6 @@
 import 'server-only';
 import { drainOutbox } from '../mail/drain-outbox';
+import { sweepPictures } from '../pictures/sweep-pictures';
 import { purgeDrafts } from '../registration/purge-drafts';
 import { purgeNeeds } from '../registration/purge-needs';
 import { reconcilePayments } from '../registration/reconcile-payments';
@@ -15,4 +16,5 @@ export const listJobs = (): Job[] => [
   { name: 'reconcile-payments', everyMs: 30_000, run: reconcilePayments },
   { name: 'purge-drafts', everyMs: 60 * 60_000, run: purgeDrafts },
   { name: 'purge-needs', everyMs: 60 * 60_000, run: purgeNeeds },
+  { name: 'sweep-pictures', everyMs: 60 * 60_000, run: sweepPictures },
 ];
