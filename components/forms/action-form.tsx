@@ -7,7 +7,7 @@ import {
   type SubmissionResult,
   useForm,
 } from '@conform-to/react';
-import { type ReactNode, useActionState, useEffect, useRef } from 'react';
+import { type FormEvent, type ReactNode, startTransition, useActionState, useEffect, useRef } from 'react';
 import { type ButtonTone, buttonClass } from '../ui/button';
 import { ErrorSummary } from './error-summary';
 
@@ -18,6 +18,8 @@ type ActionFormProps = {
   children?: ReactNode;
   /** The submit button's words. */
   submit: string;
+  /** What the button is called where several alike stand on a page; starts with the words of `submit`. */
+  submitLabel?: string;
   tone?: ButtonTone;
   /** Values the page knows already; what the person typed wins after a refusal. */
   defaultValue?: Record<string, unknown>;
@@ -46,14 +48,29 @@ export function ActionForm(props: ActionFormProps) {
     defaultNoValidate: true,
   });
   const summary = useRef<HTMLDivElement>(null);
+  const adds = props.defaultValue === undefined;
   useEffect(() => {
     if (state?.status === 'error') summary.current?.focus();
-  }, [state]);
+    // A form that adds something is empty for the next; one that edits goes on showing what was saved.
+    if (state?.status === 'success' && adds) summary.current?.closest('form')?.reset();
+  }, [state, adds]);
+
+  const { onSubmit, ...bound } = getFormProps(form);
+  // Sent by hand: React empties a form after its action, refused or not, and with it all that was typed.
+  const sendTyped = (event: FormEvent<HTMLFormElement>) => {
+    onSubmit(event);
+    if (event.defaultPrevented) return;
+    event.preventDefault();
+    const { submitter } = event.nativeEvent as SubmitEvent;
+    const typed = new FormData(event.currentTarget, submitter);
+    startTransition(() => send(typed));
+  };
 
   return (
     <FormProvider context={form.context}>
       <form
-        {...getFormProps(form)}
+        {...bound}
+        onSubmit={sendTyped}
         action={send}
         noValidate
         className={props.className ?? 'grid max-w-prose gap-6'}
@@ -69,7 +86,12 @@ export function ActionForm(props: ActionFormProps) {
         ))}
         {props.children}
         <div className="flex flex-wrap items-center gap-4">
-          <button type="submit" className={buttonClass(props.tone ?? 'primary')} aria-disabled={pending}>
+          <button
+            type="submit"
+            className={buttonClass(props.tone ?? 'primary')}
+            aria-disabled={pending}
+            aria-label={props.submitLabel}
+          >
             {pending ? 'One moment…' : props.submit}
           </button>
           {props.beside}

@@ -47,7 +47,7 @@ export const emailToken = sqliteTable(
       .$type<UserId>()
       .notNull()
       .references(() => user.id, { onDelete: 'cascade' }),
-    kind: text('kind').$type<'verify' | 'reset'>().notNull(),
+    kind: text('kind').$type<'verify' | 'reset' | 'change'>().notNull(),
     tokenHash: text('token_hash').notNull(),
     /** The address it proves: a later change of address voids it. */
     email: text('email').notNull(),

@@ -13,7 +13,9 @@ const BUDGETS = {
   'sign-in-account': { points: 8, seconds: 900 },
   // By account, all devices together that never signed in to it: caps guessing from many addresses at once.
   'sign-in-strangers': { points: 60, seconds: 3600 },
-  'sign-up': { points: 12, seconds: 3600 },
+  // By address: accounts opened, and links asked for. A camp's hall may be one address.
+  'sign-up': { points: 60, seconds: 3600 },
+  // By mailbox: how many letters of ours anybody can cause to one person.
   'mail-link': { points: 5, seconds: 3600 },
   draft: { points: 240, seconds: 600 },
   order: { points: 20, seconds: 600 },
