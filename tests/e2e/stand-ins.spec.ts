@@ -87,13 +87,20 @@ async function problems(page: Page): Promise<string[]> {
 for (const colorScheme of ['light', 'dark'] as const)
   for (const width of [390, 1440])
     test(`anyone reads every page of the stand-ins, ${colorScheme}, ${width} px`, async ({ browser }) => {
-      const [open, declined, waiting, paid, expired] = await Promise.all([
+      const [open, declined, waiting, paid, expired, slow, lost] = await Promise.all([
         newSession(),
         newSession('kim@example.test'),
         newSession('kim@example.test'),
+        newSession(),
+        newSession(),
         newSession(),
         newSession(),
       ]);
+      for (const id of [slow, lost]) await press(id, 'pay-later');
+      await fetch(`${mock.url}/_mock/sessions/${lost}/settle`, {
+        method: 'POST',
+        body: '{"status":"failed"}',
+      });
       await press(declined, 'decline');
       await press(waiting, 'needs-step');
       await press(paid, 'pay');
@@ -103,7 +110,7 @@ for (const colorScheme of ['light', 'dark'] as const)
       };
       const message = `${mail.url}/messages/${messages[0]?.id}`;
       const page = await browser.newPage({ colorScheme, viewport: { width, height: 900 } });
-      const pay = [open, declined, waiting, `${waiting}/confirm`, paid, expired, 'none'];
+      const pay = [open, declined, waiting, `${waiting}/confirm`, paid, expired, slow, lost, 'none'];
       const addresses = [
         ...pay.map((path) => `${mock.url}/pay/${path}`),
         `${mock.url}/_mock`,

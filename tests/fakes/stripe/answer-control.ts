@@ -2,8 +2,9 @@ import type { IncomingMessage, ServerResponse } from 'node:http';
 import { sendPage } from '../web/page';
 import { readBody } from '../web/read-body';
 import { sendJson } from '../web/send-json';
-import { ControlError, controls } from './control';
+import { ControlError } from './control';
 import { controlPage } from './control-page';
+import { controls } from './controls';
 import type { Mock } from './mock';
 import { problemPage } from './pay-pages';
 

@@ -2,6 +2,7 @@ import type { IncomingMessage, ServerResponse } from 'node:http';
 import { z } from 'zod';
 import { type Page, sendPage } from '../web/page';
 import { readBody } from '../web/read-body';
+import { intentOf } from './attempt-payment';
 import { commit, type Mock } from './mock';
 import {
   completePage,
@@ -13,7 +14,7 @@ import {
   successUrl,
   unknownPage,
 } from './pay-pages';
-import { intentOf, outcomes, paySession } from './pay-session';
+import { outcomes, paySession } from './pay-session';
 import type { SessionRecord } from './records';
 
 const outcomeField = z.enum(outcomes);

@@ -1,16 +1,17 @@
 import { html, type Markup } from '../web/html';
 import type { Page } from '../web/page';
-import { listDeliveries } from './control';
+import { intentOf } from './attempt-payment';
 import { formatMoney } from './currency-rules';
 import type { Mock } from './mock';
 import { formatMoment } from './pay-pages';
 import { type Delivery, faultKinds } from './records';
+import { listDeliveries } from './webhook-controls';
 
 const states: Record<string, { word: string; tone: string }> = {
   open: { word: '○ open', tone: 'wait' },
   complete: { word: '● complete', tone: 'done' },
   expired: { word: '× expired', tone: 'stop' },
-  pending: { word: '○ being sent', tone: 'wait' },
+  pending: { word: '○ on its way', tone: 'wait' },
   held: { word: '‖ held', tone: 'wait' },
   delivered: { word: '● delivered', tone: 'done' },
   dropped: { word: '× dropped', tone: 'stop' },
@@ -37,17 +38,31 @@ function lastAttempt({ attempts }: Delivery): string {
   return `${attempts.length} ${attempts.length === 1 ? 'try' : 'tries'}, last: ${last.status ?? last.error}`;
 }
 
+const settle = (path: string, what: string) =>
+  html`<div class="row">${(['succeeded', 'failed'] as const).map(
+    (status) =>
+      html`<form method="post" action="${path}">${hidden('status', status)}<button aria-label="${what}: ${status}">${status === 'failed' ? 'Let it fail' : 'Let it succeed'}</button></form>`,
+  )}</div>`;
+
+function sessionActions(mock: Mock, id: string): Markup | null {
+  const record = mock.store.get('session', id);
+  if (record?.session.status === 'open')
+    return html`<form method="post" action="/_mock/sessions/${id}/expire"><button aria-label="Expire session ${id}">Expire now</button></form>`;
+  const slow = record && intentOf(mock, record)?.status === 'processing';
+  return slow ? settle(`/_mock/sessions/${id}/settle`, `Slow transfer ${id}`) : null;
+}
+
 function sessionRows(mock: Mock): Markup {
   const rows = mock.store.all('session').reverse().slice(0, 50);
   if (rows.length === 0)
     return html`<p class="soft">None yet. They appear when the app starts a payment.</p>`;
   return html`<table class="cards"><caption>Newest first, at most 50</caption>
-<thead><tr><th scope="col">Session</th><th scope="col">Amount</th><th scope="col">State</th><th scope="col">Ends</th></tr></thead>
+<thead><tr><th scope="col">Session</th><th scope="col">Amount</th><th scope="col">State</th><th scope="col">Ends</th><th scope="col">Do</th></tr></thead>
 <tbody>${rows.map(
     ({
       session,
     }) => html`<tr><th scope="row"><a href="/pay/${session.id}" class="mono small">${session.client_reference_id ?? session.id.slice(0, 22)}</a></th>
-<td class="mono">${formatMoney(session.amount_total ?? 0, session.currency ?? 'usd')}</td><td>${state(session.status)}</td><td class="small">${formatMoment(session.expires_at)}</td></tr>`,
+<td class="mono">${formatMoney(session.amount_total ?? 0, session.currency ?? 'usd')}</td><td>${state(session.status)}${session.status === 'complete' && session.payment_status === 'unpaid' ? html`<br><span class="soft small">money not here</span>` : null}</td><td class="small">${formatMoment(session.expires_at)}</td><td>${sessionActions(mock, session.id)}</td></tr>`,
   )}</tbody></table>`;
 }
 
@@ -74,9 +89,7 @@ function refundRows(mock: Mock): Markup {
       row,
     ) => html`<tr><th scope="row" class="mono small">${row.id}</th><td class="mono">${formatMoney(row.amount, row.currency)}</td><td>${state(row.status)}</td>
 <td>${
-      row.status === 'pending'
-        ? html`<div class="row">${(['succeeded', 'failed'] as const).map((status) => html`<form method="post" action="/_mock/refunds/${row.id}/settle">${hidden('status', status)}<button aria-label="Refund ${row.id} ${status}">${status === 'failed' ? 'Let it fail' : 'Let it succeed'}</button></form>`)}</div>`
-        : ''
+      row.status === 'pending' ? settle(`/_mock/refunds/${row.id}/settle`, `Refund ${row.id}`) : ''
     }</td></tr>`,
   )}</tbody></table>`;
 }

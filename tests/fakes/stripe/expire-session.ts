@@ -1,7 +1,7 @@
 import { refused } from './api-error';
+import { intentOf } from './attempt-payment';
 import { emitEvent } from './emit-event';
 import { type Cause, commit, type Mock, noCause, seconds } from './mock';
-import { intentOf } from './pay-session';
 import type { SessionRecord } from './records';
 
 /** The one arbiter between paying and letting go: only an open session expires, otherwise an error. */

@@ -60,6 +60,7 @@ function choices({ record }: PayView): Markup {
 <div class="stack" role="group" aria-labelledby="choose">
 <button class="main" name="outcome" value="pay">Pay ${total(record)}</button>
 <button name="outcome" value="needs-step">Pay, but the bank asks me to confirm first</button>
+<button name="outcome" value="pay-later">Pay by a slow transfer: the money comes later</button>
 <button name="outcome" value="decline">The bank declines it</button>
 <button name="outcome" value="decline-funds">The bank declines it: not enough money</button>
 </div>`;
@@ -99,12 +100,36 @@ export function confirmPage({ record, merchant }: PayView): Page {
   );
 }
 
+function doneWords(view: PayView): { title: string; tone: 'done' | 'wait' | ''; words: Markup } {
+  const { record, merchant, intent } = view;
+  const sum = html`<strong class="mono">${total(record)}</strong>`;
+  if (record.session.payment_status === 'paid')
+    return {
+      title: 'Already paid',
+      tone: 'done',
+      words: html`${sum} went to ${merchant}. Nothing more to pay here.`,
+    };
+  if (record.session.payment_status === 'no_payment_required')
+    return { title: 'Already finished', tone: 'done', words: html`There was nothing to pay.` };
+  if (intent?.status === 'processing')
+    return {
+      title: 'On its way',
+      tone: 'wait',
+      words: html`${sum} is on its way to ${merchant} by a slow transfer. Whether it arrives is decided on <a href="/_mock">the stand-in’s own page</a>.`,
+    };
+  return {
+    title: 'Not paid',
+    tone: '',
+    words: html`The slow transfer of ${sum} did not arrive. This page is closed; ask ${merchant} how to pay.`,
+  };
+}
+
 export function completePage(view: PayView): Page {
-  const paid = view.record.session.payment_status === 'paid';
+  const { title, tone, words } = doneWords(view);
   return frame(
-    paid ? 'Already paid' : 'Already finished',
-    html`<h1>${paid ? 'Already paid' : 'Already finished'}</h1>
-<div class="panel said done"><p>${paid ? html`<strong class="mono">${total(view.record)}</strong> went to ${view.merchant}. Nothing more to pay here.` : 'There was nothing to pay.'}</p></div>
+    title,
+    html`<h1>${title}</h1>
+<div class="panel said ${tone}"><p>${words}</p></div>
 ${lines(view)}
 <p class="after"><a class="button main" href="${successUrl(view.record)}">Go on to ${view.merchant}</a></p>`,
   );

@@ -1,14 +1,28 @@
 import type { Stripe } from 'stripe';
-import { buildBalance } from './build-balance';
+import {
+  attemptIntent,
+  chargeIntent,
+  completeSession,
+  failIntent,
+  intentOf,
+  putIntent,
+} from './attempt-payment';
 import { buildCharge, type Decline } from './build-charge';
-import { buildIntent } from './build-intent';
-import { customerDetails } from './build-session';
 import { emitEvent } from './emit-event';
 import { type Mock, noCause, seconds } from './mock';
 import { newId } from './new-id';
+import { paySlowly } from './pay-slowly';
 import type { SessionRecord } from './records';
 
-export const outcomes = ['pay', 'decline', 'decline-funds', 'needs-step', 'approve', 'refuse'] as const;
+export const outcomes = [
+  'pay',
+  'pay-later',
+  'decline',
+  'decline-funds',
+  'needs-step',
+  'approve',
+  'refuse',
+] as const;
 export type Outcome = (typeof outcomes)[number];
 
 // Codes of the published list "Decline codes"; the sentences are ours.
@@ -27,85 +41,6 @@ const declines = {
   },
 } satisfies Record<string, Decline>;
 
-function putIntent(mock: Mock, intent: Stripe.PaymentIntent): Stripe.PaymentIntent {
-  mock.store.put('intent', intent.id, intent);
-  return intent;
-}
-
-export function intentOf(mock: Mock, { session }: SessionRecord): Stripe.PaymentIntent | undefined {
-  return typeof session.payment_intent === 'string'
-    ? mock.store.get('intent', session.payment_intent)
-    : undefined;
-}
-
-/** The session's intent; the first attempt makes it. */
-function attemptIntent(mock: Mock, record: SessionRecord): Stripe.PaymentIntent {
-  const known = intentOf(mock, record);
-  if (known) return known;
-  const intent = putIntent(mock, buildIntent(record, seconds(mock)));
-  const session = { ...record.session, payment_intent: intent.id };
-  mock.store.put('session', session.id, { ...record, session });
-  emitEvent(mock, noCause, 'payment_intent.created', intent);
-  return intent;
-}
-
-function complete(mock: Mock, sessionId: string, email: string | null): void {
-  const record = mock.store.get('session', sessionId);
-  if (!record) return;
-  const { session } = record;
-  const done: Stripe.Checkout.Session = {
-    ...session,
-    customer_details: session.customer_details ?? (email ? customerDetails(email) : null),
-    payment_status: session.amount_total === 0 ? 'no_payment_required' : 'paid',
-    status: 'complete',
-    url: null,
-  };
-  mock.store.put('session', sessionId, { ...record, session: done });
-  emitEvent(mock, noCause, 'checkout.session.completed', done);
-}
-
-function charge(
-  mock: Mock,
-  record: SessionRecord,
-  intent: Stripe.PaymentIntent,
-  email: string | null,
-  challenged: boolean,
-): void {
-  const created = seconds(mock);
-  const made = buildCharge(intent, {
-    created,
-    email,
-    receiptBase: `${mock.baseUrl}/pay/${record.session.id}`,
-    threeDSecure: challenged,
-  });
-  const balance = buildBalance(made, created, 'charge');
-  const settled = { ...made, balance_transaction: balance.id };
-  mock.store.put('balance', balance.id, balance);
-  mock.store.put('charge', settled.id, settled);
-  const paid = putIntent(mock, {
-    ...intent,
-    amount_received: intent.amount,
-    last_payment_error: null,
-    latest_charge: settled.id,
-    next_action: null,
-    payment_method: settled.payment_method,
-    status: 'succeeded',
-  });
-  emitEvent(mock, noCause, 'charge.succeeded', settled);
-  emitEvent(mock, noCause, 'payment_intent.succeeded', paid);
-}
-
-function fail(mock: Mock, intent: Stripe.PaymentIntent, error: Stripe.PaymentIntent.LastPaymentError): void {
-  const failed = putIntent(mock, {
-    ...intent,
-    last_payment_error: error,
-    next_action: null,
-    payment_method: null,
-    status: 'requires_payment_method',
-  });
-  emitEvent(mock, noCause, 'payment_intent.payment_failed', failed);
-}
-
 function declineWith(
   mock: Mock,
   record: SessionRecord,
@@ -119,7 +54,7 @@ function declineWith(
   );
   mock.store.put('charge', failed.id, failed);
   emitEvent(mock, noCause, 'charge.failed', failed);
-  fail(
+  failIntent(
     mock,
     { ...intent, latest_charge: failed.id },
     {
@@ -158,16 +93,20 @@ export function paySession(mock: Mock, sessionId: string, outcome: Outcome, emai
   const waiting = intentOf(mock, record)?.status === 'requires_action';
   if ((outcome === 'approve' || outcome === 'refuse') && !waiting) return false;
   if (record.session.amount_total === 0) {
-    if (outcome === 'pay') complete(mock, sessionId, payer);
+    if (outcome === 'pay') completeSession(mock, sessionId, payer, 'no_payment_required');
     return outcome === 'pay';
+  }
+  if (outcome === 'pay-later') {
+    paySlowly(mock, record, payer);
+    return true;
   }
   const intent = attemptIntent(mock, record);
   if (outcome === 'pay' || outcome === 'approve') {
-    charge(mock, record, intent, payer, outcome === 'approve');
-    complete(mock, sessionId, payer);
+    chargeIntent(mock, record, intent, payer, outcome === 'approve');
+    completeSession(mock, sessionId, payer, 'paid');
   } else if (outcome === 'needs-step') askForStep(mock, record, intent);
   else if (outcome === 'refuse')
-    fail(mock, intent, {
+    failIntent(mock, intent, {
       type: 'invalid_request_error',
       code: 'payment_intent_authentication_failure',
       message: 'The bank’s confirmation was refused, so nothing was paid.',

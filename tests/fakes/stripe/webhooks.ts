@@ -6,6 +6,8 @@ import type { Store } from './store';
 export const enabledEvents = new Set([
   'checkout.session.completed',
   'checkout.session.expired',
+  'checkout.session.async_payment_succeeded',
+  'checkout.session.async_payment_failed',
   'payment_intent.succeeded',
   'payment_intent.payment_failed',
   'payment_intent.canceled',

@@ -9,4 +9,10 @@ export function readSettings<S extends z.ZodObject>(schema: S, what: string): z.
   process.exit(1);
 }
 
-export const portSetting = (fallback: number) => z.coerce.number().int().min(0).max(65_535).default(fallback);
+export const portSetting = (fallback: number) =>
+  z.coerce
+    .number('is a port number, 0 to 65535')
+    .int('is a port number, 0 to 65535')
+    .min(0, 'is a port number, 0 to 65535')
+    .max(65_535, 'is a port number, 0 to 65535')
+    .default(fallback);

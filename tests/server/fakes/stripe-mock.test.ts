@@ -245,6 +245,37 @@ describe('checkout sessions', () => {
     );
   });
 
+  test('a slow transfer completes it unpaid; the money comes, or does not, later', async () => {
+    const settle = (id: string, status: string) => control(mock, 'POST', `sessions/${id}/settle`, { status });
+    const [comes, fails] = [
+      await stripe.checkout.sessions.create(sessionParams()),
+      await stripe.checkout.sessions.create(sessionParams()),
+    ];
+    for (const { id } of [comes, fails]) {
+      await pay(id, 'pay-later');
+      const waiting = await stripe.checkout.sessions.retrieve(id, { expand: ['payment_intent'] });
+      expect(waiting).toMatchObject({ status: 'complete', payment_status: 'unpaid' });
+      expect(publishedProblems('PaymentIntent', waiting.payment_intent as Stripe.PaymentIntent)).toEqual([]);
+      expect((await caught(stripe.checkout.sessions.expire(id)))?.statusCode).toBe(400);
+    }
+    await settle(comes.id, 'succeeded');
+    await settle(fails.id, 'failed');
+    expect((await settle(comes.id, 'failed')).status).toBe(409);
+    expect((await stripe.checkout.sessions.retrieve(comes.id)).payment_status).toBe('paid');
+    expect((await stripe.checkout.sessions.retrieve(fails.id)).payment_status).toBe('unpaid');
+    expect((await stripe.charges.list()).data.map(({ paid }) => paid)).toEqual([true]);
+    await vi.waitFor(() =>
+      expect(typesGot()).toEqual([
+        'checkout.session.async_payment_failed',
+        'checkout.session.async_payment_succeeded',
+        'checkout.session.completed',
+        'checkout.session.completed',
+        'payment_intent.payment_failed',
+        'payment_intent.succeeded',
+      ]),
+    );
+  });
+
   test('expire works on an open session only: it decides between paying and letting go', async () => {
     const paid = await stripe.checkout.sessions.create(sessionParams());
     await pay(paid.id, 'pay');
