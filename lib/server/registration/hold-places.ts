@@ -57,7 +57,7 @@ export function holdPlaces(
     if (!quote) return err({ code: 'camp_closed', sale: 'no_price' });
 
     const { who } = answers;
-    const isOwnAddress = user !== null && user.emailVerified && user.email === who.attendeeEmail;
+    const isOwnAddress = user?.emailVerified === true && user.email === who.attendeeEmail;
     const id = insertOrder(tx, {
       organisationId: programme.camp.organisationId,
       campId,
@@ -66,7 +66,7 @@ export function holdPlaces(
         name: who.payer === 'other' ? who.payerName : who.attendeeName,
         email: who.payer === 'other' ? who.payerEmail : who.attendeeEmail,
       },
-      attendees: [{ userId: isOwnAddress ? user.id : null, answers }],
+      attendees: [{ userId: isOwnAddress ? (user?.id ?? null) : null, answers }],
       quote,
       refundTerms: programme.camp.refundTerms,
       heldUntil: now + env().HOLD_MINUTES * 60_000,

@@ -1,13 +1,9 @@
 import 'server-only';
-import { and, asc, eq, inArray, lte } from 'drizzle-orm';
-import { payment } from '@/db/schema/money';
+import { and, asc, eq, lte } from 'drizzle-orm';
 import { order } from '@/db/schema/order';
-import type { OrderId } from '@/lib/domain/shared/ids';
 import { getDb, inTransaction } from '../db';
-import { expireSession } from '../payments/expire-session';
-import { applySession } from './apply-session';
+import { endSessions } from './end-sessions';
 import { lapseOrder } from './lapse-order';
-import { openPayment } from './open-payment';
 
 const AT_ONCE = 200;
 
@@ -30,26 +26,4 @@ export async function sweepHolds(now: number): Promise<number> {
     if (inTransaction((tx) => lapseOrder(tx, id, now))) ended += 1;
   }
   return ended;
-}
-
-/** True when the provider has answered for every session of the order. */
-async function endSessions(orderId: OrderId, now: number): Promise<boolean> {
-  const live = getDb()
-    .select()
-    .from(payment)
-    .where(and(eq(payment.orderId, orderId), inArray(payment.state, ['opening', 'open'])))
-    .all();
-  for (const row of live) {
-    let { sessionId } = row;
-    if (sessionId === null) {
-      const opened = await openPayment(row.id, now);
-      if (!opened.ok && opened.error === 'unavailable') return false;
-      sessionId = opened.ok ? opened.value.id : null;
-    }
-    if (sessionId === null) continue;
-    const told = await expireSession(sessionId);
-    if (!told.ok) return false;
-    inTransaction((tx) => applySession(tx, told.value, now));
-  }
-  return true;
 }

@@ -1,0 +1,26 @@
+'use client';
+
+import { useRouter } from 'next/navigation';
+import { useEffect, useState } from 'react';
+
+const EVERY = 3_000;
+const TIMES = 40;
+
+/** Loads the page's news afresh every few seconds for two minutes; without JavaScript, by the link. */
+export function LookAgain() {
+  const router = useRouter();
+  const [times, setTimes] = useState(0);
+  useEffect(() => {
+    if (times >= TIMES) return;
+    const timer = setTimeout(() => {
+      router.refresh();
+      setTimes(times + 1);
+    }, EVERY);
+    return () => clearTimeout(timer);
+  }, [times, router]);
+  return (
+    <a href="?" className="inline-flex min-h-target items-center">
+      Look again now
+    </a>
+  );
+}

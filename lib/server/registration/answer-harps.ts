@@ -1,0 +1,31 @@
+import 'server-only';
+import type { z } from 'zod';
+import { harpId } from '@/lib/domain/harp/harp-id';
+import { harpFromLabel } from '@/lib/domain/harp/harp-label';
+import { ok, type Result } from '@/lib/domain/shared/result';
+import type { harpsFormSchema } from '@/lib/schemas/registration';
+import { type Refusal, refuse } from '../errors';
+import { keepAnswer } from './keep-answer';
+import { requireOnSale } from './require-on-sale';
+
+/** Takes the harps somebody owns, with the one chosen in the lists whichever button was pressed. None is an answer. */
+export async function answerHarps(
+  input: z.output<typeof harpsFormSchema>,
+  now: number,
+): Promise<Result<null, Refusal>> {
+  const sale = requireOnSale(input.slug, now);
+  if (!sale.ok) return sale;
+  if (input.intent === 'add' && input.addKey === '')
+    return refuse('bad_input', { fields: { addKey: ['Choose the key of the harp to add.'] } });
+  const added =
+    input.addKey === ''
+      ? []
+      : [
+          harpId(
+            harpFromLabel({ labelKey: input.addKey, tuning: input.addTuning, register: input.addRegister }),
+          ),
+        ];
+  const harpIds = [...new Set<string>([...input.harpIds, ...added])];
+  await keepAnswer(sale.value.programme.camp, { harps: { harpIds } }, now);
+  return ok(null);
+}
