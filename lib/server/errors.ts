@@ -21,6 +21,7 @@ export const ERRORS = {
     sentence: 'Something is still missing for this. Look at the list and mend it first.',
   },
   in_use: { status: 409, sentence: 'Something else still uses this. Change that first.' },
+  clash: { status: 409, sentence: 'That does not fit the timetable. Nothing was changed.' },
   too_large: { status: 413, sentence: 'That is too large to take. The limit is 10 MB.' },
   camp_full: {
     status: 409,
