@@ -18,13 +18,13 @@ type SelectFieldProps = {
 
 export function SelectField({ name, label, choices, hint, optional, blank }: SelectFieldProps) {
   const [field] = useField<string>(name);
+  // A key after a spread makes React take the options for a list without keys.
+  const { key: _, ...props } = getSelectProps(field, {
+    ariaDescribedBy: hint ? field.descriptionId : undefined,
+  });
   return (
     <FieldFrame id={field.id} label={label} hint={hint} errors={field.errors} optional={optional}>
-      <select
-        {...getSelectProps(field, { ariaDescribedBy: hint ? field.descriptionId : undefined })}
-        key={field.key}
-        className={CONTROL}
-      >
+      <select key={field.key} {...props} className={CONTROL}>
         {blank !== undefined && <option value="">{blank}</option>}
         {choices.map((choice) => (
           <option key={choice.value} value={choice.value} disabled={choice.disabled}>

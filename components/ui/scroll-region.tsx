@@ -8,7 +8,12 @@ const REACHABLE = { tabIndex: 0 };
 /** A part of the page that scrolls by itself, such as a wide table; named, and reachable by keyboard. */
 export function ScrollRegion({ label, children, className = '', style }: ScrollRegionProps) {
   return (
-    <section aria-label={label} className={`overflow-auto ${className}`} style={style} {...REACHABLE}>
+    <section
+      aria-label={label}
+      className={`relative overflow-auto ${className}`}
+      style={style}
+      {...REACHABLE}
+    >
       {children}
     </section>
   );

@@ -6,6 +6,7 @@ import { ok, type Result } from '@/lib/domain/shared/result';
 import type { MoveMeetingInput } from '@/lib/schemas/meeting';
 import { writeAudit } from '../audit/write-audit';
 import { loadProgramme } from '../camps/load-programme';
+import { ownCamp } from '../camps/own-camp';
 import { inTransaction } from '../db';
 import { type Refusal, refuse } from '../errors';
 import type { Context } from '../ladder';
@@ -18,7 +19,7 @@ export function moveMeeting(
   { actor, now }: Pick<Context, 'actor' | 'now'>,
 ): Result<{ meetingId: MeetingId }, Refusal> {
   return inTransaction((tx) => {
-    const programme = loadProgramme(campId, tx);
+    const programme = ownCamp(actor, campId, 'timetable.edit', tx) && loadProgramme(campId, tx);
     const row = programme?.meetings.find(({ id }) => id === meetingId);
     if (!programme || !row) return refuse('not_found');
     if (row.updatedAt !== updatedAt)

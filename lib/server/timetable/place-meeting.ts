@@ -5,6 +5,7 @@ import { ok, type Result } from '@/lib/domain/shared/result';
 import type { PlaceMeetingInput } from '@/lib/schemas/meeting';
 import { writeAudit } from '../audit/write-audit';
 import { loadProgramme } from '../camps/load-programme';
+import { ownCamp } from '../camps/own-camp';
 import { inTransaction } from '../db';
 import { type Refusal, refuse } from '../errors';
 import type { Context } from '../ladder';
@@ -18,7 +19,7 @@ export function placeMeeting(
   { actor, now }: Pick<Context, 'actor' | 'now'>,
 ): Result<{ meetingId: MeetingId }, Refusal> {
   return inTransaction((tx) => {
-    const programme = loadProgramme(campId, tx);
+    const programme = ownCamp(actor, campId, 'timetable.edit', tx) && loadProgramme(campId, tx);
     if (!programme) return refuse('not_found');
     const usual = programme.workshops.find(({ id }) => id === workshopId)?.lengthMinutes ?? 60;
     const row = {

@@ -5,6 +5,7 @@ import { ok, type Result } from '@/lib/domain/shared/result';
 import type { RemoveMeetingInput } from '@/lib/schemas/meeting';
 import { writeAudit } from '../audit/write-audit';
 import { loadProgramme } from '../camps/load-programme';
+import { ownCamp } from '../camps/own-camp';
 import { inTransaction } from '../db';
 import { type Refusal, refuse } from '../errors';
 import type { Context } from '../ladder';
@@ -16,7 +17,7 @@ export function removeMeeting(
   { actor, now }: Pick<Context, 'actor' | 'now'>,
 ): Result<null, Refusal> {
   return inTransaction((tx) => {
-    const programme = loadProgramme(campId, tx);
+    const programme = ownCamp(actor, campId, 'timetable.edit', tx) && loadProgramme(campId, tx);
     const row = programme?.meetings.find(({ id }) => id === meetingId);
     if (!programme || !row) return refuse('not_found');
     if (row.updatedAt !== updatedAt)

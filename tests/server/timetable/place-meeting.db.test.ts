@@ -8,10 +8,11 @@ import { placeMeeting } from '@/lib/server/timetable/place-meeting';
 import { removeMeeting } from '@/lib/server/timetable/remove-meeting';
 import { buildCamp, NOW } from '../../builders/build-camp';
 import { buildWorkshop } from '../../builders/build-workshop';
+import { staff } from '../../builders/staff';
 import { useTestDatabase } from '../../setup/test-database';
 
 const test_ = useTestDatabase();
-const context = { actor: VISITOR, now: NOW };
+const context = { actor: staff('organiser'), now: NOW };
 let ids: ReturnType<typeof buildCamp>;
 
 beforeEach(() => {
@@ -77,6 +78,26 @@ test('rooms and workshops of another camp are not to be had', () => {
   };
   expect(moveMeeting(stranger, context)).toMatchObject({ error: { code: 'not_found' } });
   expect(removeMeeting(stranger, context)).toMatchObject({ error: { code: 'not_found' } });
+  expect(test_.db.select().from(meeting).all()).toEqual([mine]);
+});
+
+test('nobody else may place, move or remove', () => {
+  const mine = placed();
+  const theirs = { ...slot(), meetingId: mine.id, updatedAt: mine.updatedAt };
+  for (const actor of [
+    staff('treasurer'),
+    staff('instructor'),
+    staff('door'),
+    staff('organiser', 'org_2'),
+    VISITOR,
+  ]) {
+    const by = { actor, now: NOW };
+    expect(placeMeeting({ ...slot(), workshopId: 'wsh_2', starts: '11:00' }, by)).toMatchObject({
+      ok: false,
+    });
+    expect(moveMeeting({ ...theirs, starts: '11:00' }, by)).toMatchObject({ error: { code: 'not_found' } });
+    expect(removeMeeting(theirs, by)).toMatchObject({ error: { code: 'not_found' } });
+  }
   expect(test_.db.select().from(meeting).all()).toEqual([mine]);
 });
 

@@ -6,6 +6,7 @@ import type { Clash } from '@/lib/domain/timetable/clash';
 import type { Programme, ProgrammeMeeting, ProgrammeWorkshop } from '@/lib/domain/timetable/programme';
 import { GridCellView } from './grid-cell';
 import { PRINT_ON_ONE_SHEET } from './print-sheet';
+import { sheetType } from './sheet-type';
 import type { View } from './view';
 
 export type GridProps = {
@@ -25,17 +26,14 @@ export type GridProps = {
 /** Days across, time down, rooms as lanes of each time. */
 export function GridTable(props: GridProps) {
   const { grid, programme, day } = props;
-  // An empty lane says nothing on paper.
-  const lanes = grid.rows.flatMap((row) =>
-    row.lanes.filter((lane) => lane.cells.some(({ meetings }) => meetings.length)),
-  );
   return (
     <ScrollRegion
       label="Timetable grid"
       className="timetable-sheet border-t-2 border-ink lg:max-h-[88vh] print:max-h-none print:overflow-visible"
-      style={{ '--lanes': lanes.length, '--days': grid.days.length } as CSSProperties}
+      style={{ '--sheet-type': `${sheetType(grid, programme)}pt` } as CSSProperties}
     >
       <style>{PRINT_ON_ONE_SHEET}</style>
+      <h2 className="sr-only">Meetings</h2>
       <p className="hidden font-bold print:block">
         {programme.camp.name}: timetable ({programme.camp.timeZone})
       </p>

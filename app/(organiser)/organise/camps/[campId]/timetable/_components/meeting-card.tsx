@@ -54,12 +54,15 @@ export function MeetingCard({ meeting, programme, clashes, href, moving }: Meeti
           <HarpName>{workshop.title}</HarpName>
         )}
       </h3>
-      {whose && <p className="font-semibold">{whose}</p>}
-      {instructors.length > 0 && <p>{instructors.join(', ')}</p>}
+      <CardHarps needs={workshop.needs} title={workshop.title} />
+      <p>
+        {whose && <span className="font-semibold">{whose}</span>}
+        {whose && instructors.length > 0 && ', '}
+        {instructors.join(', ')}
+      </p>
       <p className="text-soft print:hidden">
         {KIND_WORDS[workshop.kind]}, {SOUND_WORDS[KIND_LOUDNESS[workshop.kind]].toLowerCase()}
       </p>
-      <CardHarps needs={workshop.needs} title={workshop.title} />
       {own.length > 0 && (
         <p className="print:hidden">
           <StateMark tone={own.some(isRefused) ? 'stop' : 'wait'}>
