@@ -11,4 +11,5 @@ export const staff = (
   user: { id, name: role, email: `${role}@example.test`, emailVerified: true },
   roles: [{ organisationId, role }],
   orders: [],
+  registrations: [],
 });
