@@ -32,7 +32,9 @@ export function HarpChoices({ common, others }: HarpChoicesProps) {
         {ids === common && field.errors && (
           <p className="font-semibold text-reed">{field.errors.join(' ')}</p>
         )}
-        <div className="mt-2 grid grid-cols-2 gap-2 sm:grid-cols-3">
+        <div
+          className={`mt-2 grid gap-2 ${ids === common ? 'grid-cols-2 sm:grid-cols-3' : 'sm:grid-cols-2'}`}
+        >
           {inputs
             .filter((input) => ids.includes(input.value))
             .map(({ key, ...input }) => {

@@ -30,7 +30,7 @@ export function TrackFields({ programme, places }: { programme: Programme; place
             disabled: seats === 0,
             hint: (
               <>
-                {track.gate && <span className="block text-ink">You can already: {track.gate}</span>}
+                {track.gate && <span className="block text-ink">Asked of you: {track.gate}</span>}
                 <span className="block">
                   {price !== null && <span className="figures">{formatMoney(price, camp.currency)}</span>}
                   {price !== null && ' · '}
