@@ -17,6 +17,7 @@ export type CampLine = {
   startsOn: string;
   endsOn: string;
   timeZone: string;
+  currency: string;
   venueName: string;
   capacity: number;
   taken: number;
@@ -48,6 +49,7 @@ export function listCamps(actor: Actor, organisationId?: OrganisationId): CampLi
       startsOn: camp.startsOn,
       endsOn: camp.endsOn,
       timeZone: camp.timeZone,
+      currency: camp.currency,
       venueName: camp.venueName,
       capacity: camp.capacity,
     })

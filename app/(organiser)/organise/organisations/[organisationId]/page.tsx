@@ -6,11 +6,13 @@ import { can } from '@/lib/domain/access/can';
 import { listCamps } from '@/lib/server/camps/list-camps';
 import { requireOrganisation } from '@/lib/server/organisations/require-organisation';
 import { CampList } from '../../../_components/camp-list';
+import { DoneNotice } from '../../../_components/done-notice';
 
 export const metadata: Metadata = { title: 'Camps' };
 
 export default async function OrganisationPage({
   params,
+  searchParams,
 }: PageProps<'/organise/organisations/[organisationId]'>) {
   const { actor, organisation } = await requireOrganisation(
     (await params).organisationId,
@@ -25,6 +27,7 @@ export default async function OrganisationPage({
   );
   return (
     <>
+      <DoneNotice done={(await searchParams).done} />
       <PageHead
         over={organisation.name}
         title="Camps"
