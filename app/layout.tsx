@@ -4,6 +4,7 @@ import '@fontsource-variable/atkinson-hyperlegible-mono/wght.css';
 import './globals.css';
 import type { Metadata, Viewport } from 'next';
 import type { ReactNode } from 'react';
+import { NoScriptWay } from '@/components/ui/no-script-way';
 import { env } from '@/lib/server/env';
 
 export function generateMetadata(): Metadata {
@@ -37,6 +38,7 @@ export default function RootLayout({ children }: { children: ReactNode }) {
         >
           Skip to content
         </a>
+        <NoScriptWay />
         {children}
       </body>
     </html>

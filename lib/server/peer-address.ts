@@ -1,4 +1,5 @@
 import 'server-only';
+import { AsyncLocalStorage } from 'node:async_hooks';
 import { randomUUID } from 'node:crypto';
 import http from 'node:http';
 import { env } from './env';
@@ -7,7 +8,11 @@ import { env } from './env';
 const PEER_HEADER = 'x-combwood-peer';
 const REQUEST_HEADER = 'x-combwood-request';
 
-const marked = globalThis as typeof globalThis & { combwoodPeerMarked?: boolean };
+const marked = globalThis as typeof globalThis & {
+  combwoodPeerMarked?: boolean;
+  /** The answer to the request being worked on; components/ui/no-script-way.tsx reads its status. */
+  combwoodAnswer?: AsyncLocalStorage<{ readonly statusCode: number }>;
+};
 
 /**
  * Route handlers see no socket, and Next passes a client's own X-Forwarded-For on, so rate limits by address could be
@@ -16,12 +21,16 @@ const marked = globalThis as typeof globalThis & { combwoodPeerMarked?: boolean 
 export function markRequests(): void {
   if (marked.combwoodPeerMarked) return;
   marked.combwoodPeerMarked = true;
+  const answer = new AsyncLocalStorage<{ readonly statusCode: number }>();
+  marked.combwoodAnswer = answer;
   const emit = http.Server.prototype.emit;
   http.Server.prototype.emit = function patched(this: http.Server, event: string, ...args: unknown[]) {
     const request = args[0];
     if (event === 'request' && request instanceof http.IncomingMessage) {
       request.headers[PEER_HEADER] = request.socket.remoteAddress ?? '';
       request.headers[REQUEST_HEADER] = randomUUID();
+      if (args[1] instanceof http.ServerResponse)
+        return answer.run(args[1], () => Reflect.apply(emit, this, [event, ...args]));
     }
     return Reflect.apply(emit, this, [event, ...args]);
   } as typeof emit;
