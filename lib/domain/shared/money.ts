@@ -34,6 +34,12 @@ export function formatMoney(amount: Minor, currency: string, locale = 'en-GB'): 
   }).format(amount / 10 ** digits);
 }
 
+/** `plainMoney(46050, 'EUR')` → "460.50": for spreadsheets and form fields, without a symbol. */
+export function plainMoney(amount: Minor, currency: string): string {
+  const digits = currencyDigits(currency);
+  return (amount / 10 ** digits).toFixed(digits);
+}
+
 /**
  * A typed amount ("460", "460.50", "1,250.00") to minor units; null when it is no amount or has more decimals than
  * the currency has. A comma or space is taken as a thousands mark only before groups of three digits.

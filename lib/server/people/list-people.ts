@@ -1,5 +1,5 @@
 import 'server-only';
-import { count, eq } from 'drizzle-orm';
+import { eq, inArray } from 'drizzle-orm';
 import { track } from '@/db/schema/camp';
 import { order, registration } from '@/db/schema/order';
 import { PEOPLE_PAGE_SIZE, type PeopleQuery } from '@/lib/domain/people/people-query';
@@ -15,29 +15,30 @@ import { peopleWhere } from './people-where';
 /** One page of a camp's people in four statements, whatever the camp's size. A page past the end is the last one. */
 export function listPeople(campId: CampId, query: PeopleQuery): PeoplePage {
   const db = getDb();
-  const where = peopleWhere(campId, query);
+  // One pass finds and sorts; reading every id is cheaper than a second pass that only counts.
   const found = db
-    .select({ total: count() })
+    .select({ id: registration.id })
     .from(registration)
     .innerJoin(order, eq(order.id, registration.orderId))
-    .where(where)
-    .get();
-  const total = found?.total ?? 0;
-  const pages = Math.max(1, Math.ceil(total / PEOPLE_PAGE_SIZE));
+    .innerJoin(track, eq(track.id, registration.trackId))
+    .where(peopleWhere(campId, query))
+    .orderBy(...peopleOrder(query))
+    .all();
+  const pages = Math.max(1, Math.ceil(found.length / PEOPLE_PAGE_SIZE));
   const page = Math.min(query.page, pages);
+  const ids = found.slice((page - 1) * PEOPLE_PAGE_SIZE, page * PEOPLE_PAGE_SIZE).map(({ id }) => id);
+  const onPage = inArray(registration.id, ids);
   const rows = db
     .select(peopleColumns)
     .from(registration)
     .innerJoin(order, eq(order.id, registration.orderId))
     .innerJoin(track, eq(track.id, registration.trackId))
-    .where(where)
-    .orderBy(...peopleOrder(query))
-    .limit(PEOPLE_PAGE_SIZE)
-    .offset((page - 1) * PEOPLE_PAGE_SIZE)
+    .where(onPage)
     .all();
-  const ids = rows.map(({ id }) => id);
-  const electives = electivesOf(ids);
-  const harps = harpsOf(ids);
+  const at = new Map(ids.map((id, place) => [id, place]));
+  rows.sort((a, b) => (at.get(a.id) ?? 0) - (at.get(b.id) ?? 0));
+  const electives = electivesOf(onPage);
+  const harps = harpsOf(onPage);
   return {
     rows: rows.map((row) => ({
       ...row,
@@ -45,7 +46,7 @@ export function listPeople(campId: CampId, query: PeopleQuery): PeoplePage {
       electives: electives.get(row.id) ?? [],
       harps: harps.get(row.id) ?? [],
     })),
-    total,
+    total: found.length,
     page,
     pages,
   };

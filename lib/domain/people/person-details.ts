@@ -1,0 +1,14 @@
+import type { Minor } from '../shared/money';
+import type { PeopleRow } from './people-row';
+
+/** One attendee with the order they stand on; no health, no emergency contact. */
+export type PersonDetails = PeopleRow & {
+  orderState: PeopleRow['state'];
+  total: Minor;
+  paid: Minor;
+  arrivedAt: number | null;
+  lines: { label: string; quantity: number; amount: Minor }[];
+  /** Others on the same order. */
+  others: { id: PeopleRow['id']; name: string; state: PeopleRow['state'] }[];
+  refunds: { amount: Minor; state: 'owed' | 'pending' | 'succeeded' | 'failed'; reason: string }[];
+};
