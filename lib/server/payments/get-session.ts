@@ -7,7 +7,8 @@ import { stripeClient } from './stripe-client';
 /** A session as the provider has it now. */
 export async function getSession(id: string): Promise<Result<ProviderSession, ProviderError>> {
   try {
-    return ok(toProviderSession(await stripeClient().checkout.sessions.retrieve(id)));
+    const session = await stripeClient().checkout.sessions.retrieve(id, { expand: ['payment_intent'] });
+    return ok(toProviderSession(session));
   } catch (error) {
     return toProviderError(error, 'session.get');
   }

@@ -15,6 +15,8 @@ export type ProviderSession = {
   url: string | null;
 };
 
+const OVER: readonly string[] = ['requires_payment_method', 'canceled'];
+
 export function toProviderSession(session: Stripe.Checkout.Session): ProviderSession {
   const { payment_intent: intent } = session;
   return {
@@ -30,6 +32,11 @@ export function toProviderSession(session: Stripe.Checkout.Session): ProviderSes
 }
 
 function sessionState(session: Stripe.Checkout.Session): ProviderSession['state'] {
-  if (session.status === 'complete') return session.payment_status === 'unpaid' ? 'waiting' : 'paid';
-  return session.status === 'expired' ? 'expired' : 'open';
+  const { status, payment_status: paid, payment_intent: intent } = session;
+  if (status === 'expired') return 'expired';
+  if (status !== 'complete') return 'open';
+  if (paid !== 'unpaid') return 'paid';
+  // A slow method that failed leaves the session complete for good; only its intent, where it was asked for, tells.
+  const failed = typeof intent === 'object' && intent !== null && OVER.includes(intent.status);
+  return failed ? 'expired' : 'waiting';
 }

@@ -40,7 +40,8 @@ export function applyRefund(tx: Tx, told: ProviderRefund, now: number): EventOut
   if (told.state === 'succeeded') post(tx, row, 'Refund', now);
   if (told.state === 'failed') {
     if (row.state === 'succeeded') post(tx, row, 'Refund came back', now);
-    oweRefund(tx, { ...row, from: now + TRY_AGAIN_AFTER, now });
+    const { orderId, paymentId, amount, currency, reason } = row;
+    oweRefund(tx, { orderId, paymentId, amount, currency, reason, from: now + TRY_AGAIN_AFTER, now });
   }
   return { outcome: 'applied', reason: `Refund ${told.state}.`, orderId: row.orderId };
 }

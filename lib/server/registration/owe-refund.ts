@@ -19,10 +19,21 @@ export function oweRefund(
     now: number;
   },
 ): Id<'rfd'> {
-  const { from, now, ...row } = owed;
+  const { orderId, paymentId, amount, currency, reason, from, now } = owed;
   const id = newId('rfd', now);
   tx.insert(refund)
-    .values({ ...row, id, state: 'owed', nextAttemptAt: from, createdAt: now, updatedAt: now })
+    .values({
+      id,
+      orderId,
+      paymentId,
+      amount,
+      currency,
+      reason,
+      state: 'owed',
+      nextAttemptAt: from,
+      createdAt: now,
+      updatedAt: now,
+    })
     .run();
   return id;
 }
