@@ -25,7 +25,7 @@ export async function SiteShell({ children, work = false }: { children: ReactNod
           {children}
         </main>
       )}
-      <SiteFoot />
+      <SiteFoot wide={work} />
     </>
   );
 }

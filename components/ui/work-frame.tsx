@@ -7,14 +7,16 @@ type WorkFrameProps = {
   name: string;
   /** Above the entries: where one is. */
   head?: ReactNode;
+  /** The same on a phone, where the page's own title follows at once. */
+  phoneHead?: ReactNode;
   entries: readonly RailEntry[];
   children: ReactNode;
 };
 
 /** A work page: a left rail of plain words on wide screens, a bottom bar on phones, and the page itself. */
-export function WorkFrame({ name, head, entries, children }: WorkFrameProps) {
+export function WorkFrame({ name, head, phoneHead, entries, children }: WorkFrameProps) {
   return (
-    <div className="flex pb-24 lg:pb-0">
+    <div className="flex min-h-[75dvh]">
       {entries.length > 0 && (
         <div className="no-print hidden w-56 shrink-0 border-r-2 border-line lg:block">
           <nav aria-label={name} className="sticky top-0 max-h-dvh overflow-y-auto py-8 pl-6">
@@ -34,7 +36,7 @@ export function WorkFrame({ name, head, entries, children }: WorkFrameProps) {
         tabIndex={-1}
         className="min-w-0 flex-1 px-4 pt-6 outline-none sm:px-6 lg:px-10 lg:pt-8"
       >
-        {head && entries.length > 0 && <div className="no-print mb-4 lg:hidden">{head}</div>}
+        {phoneHead && <div className="no-print mb-2 lg:hidden">{phoneHead}</div>}
         {children}
       </main>
       {entries.length > 0 && <BottomBar name={name} entries={entries} />}

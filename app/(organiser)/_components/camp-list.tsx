@@ -5,8 +5,15 @@ import { sayDays } from '@/lib/domain/shared/say-date';
 import type { CampLine } from '@/lib/server/camps/list-camps';
 import { CampStateMark } from './camp-state';
 
-/** Camps as lines of a programme: when, what, where, and how far it has sold. */
-export function CampList({ camps, label }: { camps: readonly CampLine[]; label: string }) {
+type CampListProps = {
+  camps: readonly CampLine[];
+  label: string;
+  /** What is next for each, by id. */
+  next?: ReadonlyMap<string, string>;
+};
+
+/** Camps as lines of a programme: when, what, where, what is next, and how far it has sold. */
+export function CampList({ camps, label, next }: CampListProps) {
   return (
     <ul aria-label={label} className="border-t-2 border-ink">
       {camps.map((camp) => {
@@ -27,6 +34,7 @@ export function CampList({ camps, label }: { camps: readonly CampLine[]; label: 
                 <span className="text-ink">{sayDays(camp.startsOn, camp.endsOn)}</span>
                 {camp.venueName && ` · ${camp.venueName}`}
               </p>
+              {next?.has(camp.id) && <p className="mt-1 font-semibold">{next.get(camp.id)}</p>}
             </div>
             <p>
               <CampStateMark state={camp.state} />

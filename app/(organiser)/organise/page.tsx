@@ -8,6 +8,7 @@ import { can } from '@/lib/domain/access/can';
 import { ROLE_WORDS } from '@/lib/domain/access/roles';
 import { requirePermission } from '@/lib/server/access/require-permission';
 import { listCamps } from '@/lib/server/camps/list-camps';
+import { listNextSteps } from '@/lib/server/camps/list-next-steps';
 import { listOrganisations } from '@/lib/server/organisations/list-organisations';
 import { CampList } from '../_components/camp-list';
 
@@ -17,6 +18,7 @@ export default async function OrganisePage() {
   const actor = await requirePermission('account.own');
   const organisations = listOrganisations(actor);
   const camps = listCamps(actor);
+  const next = listNextSteps(camps, Date.now());
   return (
     <WorkFrame name="Organise" entries={[]}>
       <PageHead
@@ -61,7 +63,7 @@ export default async function OrganisePage() {
               {creates && <ButtonLink href={`${base}/camps/new` as Route}>New camp</ButtonLink>}
             </div>
             {own.length > 0 ? (
-              <CampList camps={own} label={`Camps of ${organisation.name}`} />
+              <CampList camps={own} label={`Camps of ${organisation.name}`} next={next} />
             ) : (
               <Empty title="No camps yet">
                 <p>

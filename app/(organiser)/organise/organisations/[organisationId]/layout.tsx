@@ -11,18 +11,22 @@ export default async function OrganisationLayout({
     (await params).organisationId,
     'organisation.read',
   );
+  const back = (
+    <Link href="/organise" className="inline-flex min-h-target items-center text-small lg:min-h-0">
+      Everything I organise
+    </Link>
+  );
   return (
     <WorkFrame
       name={organisation.name}
       entries={organisationEntries(actor, organisation.id)}
       head={
         <>
-          <Link href="/organise" className="inline-flex min-h-target items-center text-small lg:min-h-0">
-            Everything I organise
-          </Link>
+          {back}
           <p className="break-words font-head font-bold leading-tight">{organisation.name}</p>
         </>
       }
+      phoneHead={back}
     >
       {children}
     </WorkFrame>

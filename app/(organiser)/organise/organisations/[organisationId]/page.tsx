@@ -4,6 +4,7 @@ import { Empty } from '@/components/ui/empty';
 import { PageHead } from '@/components/ui/page-head';
 import { can } from '@/lib/domain/access/can';
 import { listCamps } from '@/lib/server/camps/list-camps';
+import { listNextSteps } from '@/lib/server/camps/list-next-steps';
 import { requireOrganisation } from '@/lib/server/organisations/require-organisation';
 import { CampList } from '../../../_components/camp-list';
 import { DoneNotice } from '../../../_components/done-notice';
@@ -19,6 +20,7 @@ export default async function OrganisationPage({
     'organisation.read',
   );
   const camps = listCamps(actor, organisation.id);
+  const next = listNextSteps(camps, Date.now());
   const creates = can(actor, 'camp.create', { organisationId: organisation.id });
   const make = (tone: 'primary' | 'plain') => (
     <ButtonLink tone={tone} href={`/organise/organisations/${organisation.id}/camps/new` as Route}>
@@ -34,7 +36,7 @@ export default async function OrganisationPage({
         actions={creates && camps.length > 0 && make('primary')}
       />
       {camps.length > 0 ? (
-        <CampList camps={camps} label={`Camps of ${organisation.name}`} />
+        <CampList camps={camps} label={`Camps of ${organisation.name}`} next={next} />
       ) : (
         <Empty title="No camps yet">
           <p>
