@@ -5,6 +5,7 @@ export const MAIL_KINDS = [
   'verify',
   'known-address',
   'reset',
+  'account-changed',
   'invite',
   'order-confirmed',
   'packing-list',

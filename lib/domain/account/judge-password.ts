@@ -37,6 +37,6 @@ function isRun(signs: readonly string[]): boolean {
 
 /** The parts of a name and an address that are long enough to be somebody's password. */
 const namesOf = ({ email, name }: Person): string[] =>
-  [email, ...email.split('@'), ...name.normalize('NFC').split(/\s+/), name.replace(/\s+/g, '')]
+  [email, ...email.split(/[@.+_-]/), ...name.normalize('NFC').split(/\s+/), name.replace(/\s+/g, '')]
     .map((part) => part.toLowerCase())
     .filter((part) => [...part].length >= 4);

@@ -8,6 +8,7 @@ import { getDb, inTransaction } from '../db';
 import { type Refusal, refuse } from '../errors';
 import type { Context } from '../ladder';
 import { log } from '../log';
+import { enqueueMail } from '../mail/enqueue-mail';
 import { confirmPerson } from './confirm-person';
 import { type EmailToken, getEmailToken, spendEmailToken, voidEmailTokens } from './email-tokens';
 import { rememberDevice } from './known-device';
@@ -46,7 +47,7 @@ export async function verifyAddress(
       .set({ email: link.email, emailVerifiedAt: row.emailVerifiedAt ?? now })
       .where(eq(user.id, row.id))
       .run();
-    if (link.kind === 'change') moveAway(tx, link, now);
+    if (link.kind === 'change') moveAway(tx, row, link, now);
     return ok(null);
   });
   if (!done.ok) return done;
@@ -56,10 +57,17 @@ export async function verifyAddress(
   return ok({ to: opening?.next ?? (link.kind === 'change' ? '/account' : homeFor(listRoles(link.userId))) });
 }
 
-/** Older links and all sessions end with the old address (ASVS 7.4.3). */
+/** Older links and all sessions end with the old address, which is told (ASVS 7.4.3). */
 function moveAway(tx: Parameters<typeof voidEmailTokens>[0], link: EmailToken, now: number): void {
   voidEmailTokens(tx, link.userId, now);
   tx.delete(session).where(eq(session.userId, link.userId)).run();
+  enqueueMail(tx, {
+    kind: 'account-changed',
+    toName: old.name,
+    toEmail: old.email,
+    payload: { change: 'address' },
+    now,
+  });
 }
 
 async function signInAs({ userId, email }: EmailToken, now: number): Promise<void> {

@@ -11,6 +11,7 @@ export const verifyLink = (token: string): string => at(`/verify?token=${encodeU
 export const resetLink = (token: string): string => at(`/reset?token=${encodeURIComponent(token)}`);
 export const inviteLink = (token: string): string => at(`/invitations/${encodeURIComponent(token)}`);
 export const signInLink = (): string => at('/sign-in');
+export const askResetLink = (): string => at('/reset');
 
 /** The payer's: the whole booking. */
 export const orderLink = (id: OrderId): string => at(`/o/${id}?key=${orderProof(id)}`);

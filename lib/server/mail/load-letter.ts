@@ -2,6 +2,7 @@ import 'server-only';
 import type { MailKind } from '@/db/schema/mail';
 import type { MailRow } from './lease-mail';
 import type { Letter, LoadLetter } from './letter';
+import { loadAccountChanged } from './letters/account-changed';
 import { loadInvite } from './letters/invite';
 import { loadKnownAddress } from './letters/known-address';
 import { loadLatePayment } from './letters/late-payment';
@@ -15,6 +16,7 @@ const LOADERS: Record<MailKind, LoadLetter> = {
   verify: loadVerify,
   'known-address': loadKnownAddress,
   reset: loadReset,
+  'account-changed': loadAccountChanged,
   invite: loadInvite,
   'order-confirmed': loadOrderConfirmed,
   'packing-list': loadPackingList,
