@@ -4,7 +4,7 @@ import { session, user } from '@/db/schema/account';
 import { homeFor } from '@/lib/domain/account/home-for';
 import { ok, type Result } from '@/lib/domain/shared/result';
 import type { VerifyInput } from '@/lib/schemas/account';
-import { getDb, inTransaction } from '../db';
+import { getDb, inTransaction, type Tx } from '../db';
 import { type Refusal, refuse } from '../errors';
 import type { Context } from '../ladder';
 import { log } from '../log';
@@ -58,7 +58,7 @@ export async function verifyAddress(
 }
 
 /** Older links and all sessions end with the old address, which is told (ASVS 7.4.3). */
-function moveAway(tx: Parameters<typeof voidEmailTokens>[0], link: EmailToken, now: number): void {
+function moveAway(tx: Tx, old: { email: string; name: string }, link: EmailToken, now: number): void {
   voidEmailTokens(tx, link.userId, now);
   tx.delete(session).where(eq(session.userId, link.userId)).run();
   enqueueMail(tx, {

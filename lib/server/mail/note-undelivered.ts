@@ -12,6 +12,7 @@ const LETTERS: Record<MailKind, string> = {
   verify: 'The mail to prove an address',
   'known-address': 'The mail about a known address',
   reset: 'The mail to reset a password',
+  'account-changed': 'The mail about a changed account',
   invite: 'The invitation',
   'order-confirmed': 'The mail with the tickets',
   'packing-list': 'The mail with the packing list',
