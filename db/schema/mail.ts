@@ -10,6 +10,7 @@ export const MAIL_KINDS = [
   'order-confirmed',
   'packing-list',
   'late-payment',
+  'booking-link',
 ] as const;
 export type MailKind = (typeof MAIL_KINDS)[number];
 

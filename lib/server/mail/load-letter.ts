@@ -3,6 +3,7 @@ import type { MailKind } from '@/db/schema/mail';
 import type { MailRow } from './lease-mail';
 import type { Letter, LoadLetter } from './letter';
 import { loadAccountChanged } from './letters/account-changed';
+import { loadBookingLink } from './letters/booking-link';
 import { loadInvite } from './letters/invite';
 import { loadKnownAddress } from './letters/known-address';
 import { loadLatePayment } from './letters/late-payment';
@@ -21,6 +22,7 @@ const LOADERS: Record<MailKind, LoadLetter> = {
   'order-confirmed': loadOrderConfirmed,
   'packing-list': loadPackingList,
   'late-payment': loadLatePayment,
+  'booking-link': loadBookingLink,
 };
 
 export const loadLetter = async (row: MailRow, now: number): Promise<Letter> =>

@@ -17,6 +17,7 @@ const LETTERS: Record<MailKind, string> = {
   'order-confirmed': 'The mail with the tickets',
   'packing-list': 'The mail with the packing list',
   'late-payment': 'The mail about a refund',
+  'booking-link': 'The mail with the link to the booking',
 };
 const REASONS: Record<MailFailure, string> = {
   away: 'the mail server could not be reached for five days',

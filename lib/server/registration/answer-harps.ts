@@ -1,7 +1,6 @@
 import 'server-only';
 import type { z } from 'zod';
-import { harpId } from '@/lib/domain/harp/harp-id';
-import { harpFromLabel } from '@/lib/domain/harp/harp-label';
+import { ownedHarpIds } from '@/lib/domain/harp/owned-harp-ids';
 import { ok, type Result } from '@/lib/domain/shared/result';
 import type { harpsFormSchema } from '@/lib/schemas/registration';
 import { type Refusal, refuse } from '../errors';
@@ -17,15 +16,6 @@ export async function answerHarps(
   if (!sale.ok) return sale;
   if (input.intent === 'add' && input.addKey === '')
     return refuse('bad_input', { fields: { addKey: ['Choose the key of the harp to add.'] } });
-  const added =
-    input.addKey === ''
-      ? []
-      : [
-          harpId(
-            harpFromLabel({ labelKey: input.addKey, tuning: input.addTuning, register: input.addRegister }),
-          ),
-        ];
-  const harpIds = [...new Set<string>([...input.harpIds, ...added])];
-  await keepAnswer(sale.value.programme.camp, { harps: { harpIds } }, now);
+  await keepAnswer(sale.value.programme.camp, { harps: { harpIds: ownedHarpIds(input) } }, now);
   return ok(null);
 }

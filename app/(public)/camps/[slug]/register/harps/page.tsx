@@ -1,20 +1,16 @@
 import type { Metadata } from 'next';
 import { ActionForm } from '@/components/forms/action-form';
+import { AddHarp } from '@/components/harp/add-harp';
+import { HarpChoices } from '@/components/harp/harp-choices';
+import { COMMON_HARPS } from '@/lib/domain/harp/common-harps';
 import { compareHarps } from '@/lib/domain/harp/compare-harps';
 import { harpId, parseHarpId } from '@/lib/domain/harp/harp-id';
-import { PITCH_CLASSES } from '@/lib/domain/harp/pitch-class';
 import { stepPath } from '@/lib/domain/registration/step-path';
 import { openStep } from '@/lib/server/registration/open-step';
-import { AddHarp } from '../_components/add-harp';
-import { HarpChoices } from '../_components/harp-choices';
 import { StepFrame } from '../_components/step-frame';
 import { saveHarpsAction } from '../actions';
 
 export const metadata: Metadata = { title: 'Register: harps you own', robots: { index: false } };
-
-const COMMON = PITCH_CLASSES.map((root) => ({ root, tuning: 'richter', register: 'standard' }) as const)
-  .sort(compareHarps)
-  .map(harpId);
 
 export default async function HarpsPage({ params, searchParams }: PageProps<'/camps/[slug]/register/harps'>) {
   const { slug } = await params;
@@ -25,7 +21,7 @@ export default async function HarpsPage({ params, searchParams }: PageProps<'/ca
     .flatMap((id) => parseHarpId(id) ?? [])
     .sort(compareHarps)
     .map(harpId)
-    .filter((id) => !COMMON.includes(id));
+    .filter((id) => !COMMON_HARPS.includes(id));
   return (
     <StepFrame
       camp={programme.camp}
@@ -49,7 +45,7 @@ export default async function HarpsPage({ params, searchParams }: PageProps<'/ca
         <button type="submit" className="sr-only" tabIndex={-1} aria-hidden="true">
           Continue
         </button>
-        <HarpChoices common={COMMON} others={others} />
+        <HarpChoices common={COMMON_HARPS} others={others} />
         <AddHarp />
       </ActionForm>
     </StepFrame>
