@@ -7,8 +7,13 @@ export type PersonDetails = PeopleRow & {
   total: Minor;
   paid: Minor;
   arrivedAt: number | null;
-  lines: { label: string; quantity: number; amount: Minor }[];
+  lines: { id: string; label: string; quantity: number; amount: Minor }[];
   /** Others on the same order. */
   others: { id: PeopleRow['id']; name: string; state: PeopleRow['state'] }[];
-  refunds: { amount: Minor; state: 'owed' | 'pending' | 'succeeded' | 'failed'; reason: string }[];
+  refunds: {
+    id: string;
+    amount: Minor;
+    state: 'owed' | 'pending' | 'succeeded' | 'failed';
+    reason: string;
+  }[];
 };

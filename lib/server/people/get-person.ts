@@ -38,7 +38,12 @@ export function getPerson(campId: CampId, id: RegistrationId): PersonDetails | n
     electives: electivesOf(this_).get(id) ?? [],
     harps: harpsOf(this_).get(id) ?? [],
     lines: db
-      .select({ label: orderLine.label, quantity: orderLine.quantity, amount: orderLine.amount })
+      .select({
+        id: orderLine.id,
+        label: orderLine.label,
+        quantity: orderLine.quantity,
+        amount: orderLine.amount,
+      })
       .from(orderLine)
       .where(eq(orderLine.orderId, orderId))
       .orderBy(asc(orderLine.position), asc(orderLine.id))
@@ -50,7 +55,7 @@ export function getPerson(campId: CampId, id: RegistrationId): PersonDetails | n
       .orderBy(asc(registration.attendeeSearch), asc(registration.id))
       .all(),
     refunds: db
-      .select({ amount: refund.amount, state: refund.state, reason: refund.reason })
+      .select({ id: refund.id, amount: refund.amount, state: refund.state, reason: refund.reason })
       .from(refund)
       .where(eq(refund.orderId, orderId))
       .orderBy(asc(refund.createdAt), asc(refund.id))
