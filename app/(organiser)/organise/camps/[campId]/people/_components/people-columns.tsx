@@ -1,12 +1,12 @@
 import type { ReactNode } from 'react';
 import { HarpName } from '@/components/harp/harp-name';
+import { DueWords } from '@/components/orders/due-words';
+import { RegistrationStateMark } from '@/components/orders/registration-state-mark';
 import { ARRIVAL_WORDS } from '@/lib/domain/door/arrival-states';
 import type { PeopleSort } from '@/lib/domain/people/people-query';
 import type { PeopleRow } from '@/lib/domain/people/people-row';
 import { sayInstant } from '@/lib/domain/shared/say-date';
-import { DueWords } from './due-words';
 import { PersonLink } from './person-link';
-import { RegistrationStateMark } from './registration-state-mark';
 
 type With = { campId: string; timeZone: string; onOpen: (registrationId: string) => void };
 export type PeopleColumn = {

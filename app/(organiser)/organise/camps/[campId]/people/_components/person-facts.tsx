@@ -2,13 +2,13 @@ import type { Route } from 'next';
 import Link from 'next/link';
 import type { ReactNode } from 'react';
 import { HarpName } from '@/components/harp/harp-name';
+import { DueWords } from '@/components/orders/due-words';
+import { RegistrationStateMark } from '@/components/orders/registration-state-mark';
 import { ARRIVAL_WORDS } from '@/lib/domain/door/arrival-states';
 import type { PersonDetails } from '@/lib/domain/people/person-details';
 import { formatMoney } from '@/lib/domain/shared/money';
 import { sayInstant } from '@/lib/domain/shared/say-date';
-import { DueWords } from './due-words';
 import { OrderFacts } from './order-facts';
-import { RegistrationStateMark } from './registration-state-mark';
 
 type PersonFactsProps = { person: PersonDetails; campId: string; timeZone: string; mayReadNeeds: boolean };
 
