@@ -44,9 +44,11 @@ export function SortHead({ column, campId, query, change, className }: SortHeadP
         className="inline-flex min-h-target items-center gap-1 text-ink"
       >
         {column.head}
-        <svg viewBox="0 0 10 10" className={`size-2.5 ${here ? '' : 'invisible'}`} aria-hidden="true">
-          <path d={query.dir === 'asc' ? 'M5 1 9 9H1z' : 'M5 9 1 1h8z'} fill="currentColor" />
-        </svg>
+        {here && (
+          <svg viewBox="0 0 10 10" className="size-2.5" aria-hidden="true">
+            <path d={query.dir === 'asc' ? 'M5 1 9 9H1z' : 'M5 9 1 1h8z'} fill="currentColor" />
+          </svg>
+        )}
       </Link>
     </th>
   );
