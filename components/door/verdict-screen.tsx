@@ -33,14 +33,15 @@ export function VerdictScreen({ answer, onNext, onUndo }: VerdictScreenProps) {
     >
       <div className="flex flex-1 flex-col items-center justify-center gap-3 px-4 py-6 text-center">
         <VerdictShape shape={shape} />
-        <h2
-          ref={head}
-          tabIndex={-1}
-          role="alert"
-          className="font-head text-[clamp(3.2rem,15vw,9rem)] font-extrabold leading-none outline-none"
-        >
-          {word}
-        </h2>
+        <div role="alert">
+          <h2
+            ref={head}
+            tabIndex={-1}
+            className="font-head text-[clamp(3.2rem,15vw,9rem)] font-extrabold leading-none outline-none"
+          >
+            {word}
+          </h2>
+        </div>
         {person && <p className="break-words font-head text-h1">{person.name}</p>}
         {person && <p className="text-lead">{person.track}</p>}
         {answer.verdict === 'already' && person?.arrivedAt && (

@@ -11,8 +11,8 @@ export async function answerSteps(page: Page, campPath: string, player: Player):
     .click();
   await page.getByLabel('Full name of the person who comes').fill(player.name);
   await page.getByLabel('Their e-mail address').fill(player.email);
-  await page.getByLabel('The person who comes').check();
-  await page.getByLabel('No, 18 or older').check();
+  await page.getByRole('radio', { name: 'The person who comes' }).check();
+  await page.getByRole('radio', { name: 'No, 18 or older' }).check();
   await page.getByRole('button', { name: 'Continue' }).click();
   await page.getByRole('radio', { name: player.track }).check();
   if (player.elective) await page.getByRole('checkbox', { name: player.elective }).check();

@@ -55,7 +55,8 @@ test('a player who leaves a form empty is told at each field, and loses nothing'
   await page.goto(`${CAMP}/register/who`);
   await page.getByLabel('Their e-mail address').fill('no at sign');
   await page.getByRole('button', { name: 'Continue' }).click();
-  await expect(page.getByRole('alert').first()).toBeFocused();
+  await expect(page.getByText('This did not go through')).toBeVisible();
+  await expect(page.getByLabel('Full name of the person who comes')).toBeFocused();
   await expect(page.getByLabel('Full name of the person who comes')).toHaveAttribute('aria-invalid', 'true');
   await expect(page.getByLabel('Their e-mail address')).toHaveValue('no at sign');
 });

@@ -189,7 +189,7 @@ export async function startStack(port, env, { reload = false, quiet = false } = 
     const next = join(ROOT, 'node_modules/next/dist/bin/next');
     const pay = begin([...TSX, 'tests/fakes/stripe/main.ts'], 'payment service');
     const mail = begin([...TSX, 'tests/fakes/mail/main.ts'], 'mail server');
-    const app = begin([next, reload ? 'dev' : 'start', '-p', String(port)], 'application');
+    const app = begin([next, reload ? 'dev' : 'start', '-H', 'localhost', '-p', String(port)], 'application');
     await waitFor(`${at.pay}/_mock/health`, pay, 'payment service');
     await waitFor(`${at.mail}/api/messages`, mail, 'mail server');
     await waitFor(`${at.app}/api/health`, app, 'application');
