@@ -10,12 +10,12 @@ async function tabTo(page: Page, fits: string): Promise<void> {
       if (!(at instanceof HTMLElement)) return '';
       const labels =
         at instanceof HTMLInputElement
-          ? [...(at.labels ?? [])].map((label) => label.innerText).join(' ')
+          ? [...(at.labels ?? [])].map((label) => label.textContent).join(' ')
           : '';
       const box = at.getBoundingClientRect();
       // WCAG 2.4.11: what has the focus is in sight.
       const seen = box.bottom > 0 && box.top < innerHeight && getComputedStyle(at).outlineStyle !== 'none';
-      return `${at.getAttribute('aria-label') ?? ''} ${labels} ${at.innerText} ${at.getAttribute('name') ?? ''}|${seen}`;
+      return `${at.getAttribute('aria-label') ?? ''} ${labels} ${at.textContent} ${at.getAttribute('name') ?? ''}|${seen}`;
     });
     if (here.includes(fits)) {
       expect(here, 'the focus is in sight and has its ring').toMatch(/\|true$/);
