@@ -3,6 +3,7 @@ import type { CampStanding } from '@/lib/domain/camp/camp-standing';
 import { toLivePlaces } from '@/lib/domain/camp/live-places';
 import type { CampPlaces } from '@/lib/domain/camp/places';
 import { priceFrom } from '@/lib/domain/camp/price-from';
+import type { TrackHarps } from '@/lib/domain/packing/track-harps';
 import type { Programme } from '@/lib/domain/timetable/programme';
 import { PlainText } from '../ui/plain-text';
 import { Section } from '../ui/section';
@@ -20,12 +21,14 @@ type CampPageProps = {
   programme: Programme;
   places: CampPlaces;
   standing: CampStanding;
+  /** Worked out already, where the page is read often. */
+  harps?: TrackHarps;
   /** What keeps the counts fresh; absent in the organiser's preview. */
   watch?: ReactNode;
 };
 
 /** A camp as the public sees it; the organiser's preview shows this very page. */
-export function CampPage({ programme, places, standing, watch }: CampPageProps) {
+export function CampPage({ programme, places, standing, harps, watch }: CampPageProps) {
   const { camp, tracks, instructors } = programme;
   const sells = standing === 'open' || standing === 'full' || standing === 'draft';
   const { left, of } = toLivePlaces(places).camp;
@@ -50,7 +53,7 @@ export function CampPage({ programme, places, standing, watch }: CampPageProps) 
           title="Tracks and harps"
           note="Chips show the key on the cover, lowest harp first."
         >
-          <TrackList programme={programme} places={sells ? places.tracks : []} />
+          <TrackList programme={programme} harps={harps} places={sells ? places.tracks : []} />
         </Section>
       )}
       <Section id="programme" title="Programme" note={`Times are local: ${camp.timeZone}.`} wide>

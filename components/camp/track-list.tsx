@@ -1,5 +1,5 @@
 import { LEVEL_WORDS } from '@/lib/domain/camp/camp-words';
-import { trackHarps } from '@/lib/domain/packing/track-harps';
+import { type TrackHarps as TrackHarpsById, trackHarps } from '@/lib/domain/packing/track-harps';
 import { formatMoney } from '@/lib/domain/shared/money';
 import type { Programme, ProgrammeTrack } from '@/lib/domain/timetable/programme';
 import { PlacesSpot } from './places-spot';
@@ -7,11 +7,12 @@ import { TrackHarps } from './track-harps';
 
 type TrackListProps = {
   programme: Programme;
+  harps?: TrackHarpsById;
   places: readonly { id: string; places: { left: number; capacity: number } }[];
 };
 
 /** Every track: what it asks of a player, what it leaves free, and the harps it takes. */
-export function TrackList({ programme, places }: TrackListProps) {
+export function TrackList({ programme, harps, places }: TrackListProps) {
   const { camp, tracks } = programme;
   return (
     <ol className="divide-y divide-edge border-y border-edge">
@@ -28,7 +29,7 @@ export function TrackList({ programme, places }: TrackListProps) {
                   {track.gate}
                 </p>
               )}
-              <TrackHarps track={track} list={trackHarps(programme, track.id)} />
+              <TrackHarps track={track} list={harps?.get(track.id) ?? trackHarps(programme, track.id)} />
             </div>
             <div className="space-y-2">
               {seats && (

@@ -5,6 +5,8 @@ import { buildPackingList } from './build-packing-list';
 import type { PackingList } from './packing-list';
 import { toPackingMeetings } from './to-packing-meetings';
 
+export type TrackHarps = ReadonlyMap<TrackId, PackingList>;
+
 /** What somebody who owns no harp and takes no elective packs for a track: what the camp page tells before one buys. */
 export const trackHarps = (
   programme: Pick<Programme, 'workshops' | 'meetings' | 'rooms'>,

@@ -7,7 +7,10 @@ import { decimalMoney } from '@/lib/domain/shared/decimal-money';
 import type { PublicCamp } from './get-public-camp';
 
 /** A camp as schema.org has events, for search engines and calendars. `base` is the site's address. */
-export function eventData({ programme, places, standing }: PublicCamp, base: string): WithContext<Event> {
+export function eventData(
+  { programme, places, standing }: Omit<PublicCamp, 'harps'>,
+  base: string,
+): WithContext<Event> {
   const { camp, tracks, instructors, pictures } = programme;
   const url = `${base}/camps/${camp.slug}`;
   const price = priceFrom(camp, tracks);

@@ -32,7 +32,7 @@ export async function generateMetadata({ params }: PageProps): Promise<Metadata>
 export default async function Page({ params }: PageProps) {
   const found = getPublicCamp((await params).slug);
   if (!found) notFound();
-  const { programme, places, standing } = found;
+  const { programme, harps, places, standing } = found;
   const sells = standing === 'open' || standing === 'full';
   return (
     <>
@@ -42,6 +42,7 @@ export default async function Page({ params }: PageProps) {
       />
       <CampPage
         programme={programme}
+        harps={harps}
         places={places}
         standing={standing}
         watch={sells && <PlacesWatch slug={programme.camp.slug} left={toLivePlaces(places).camp.left} />}
