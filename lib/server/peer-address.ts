@@ -2,6 +2,7 @@ import 'server-only';
 import { AsyncLocalStorage } from 'node:async_hooks';
 import { randomUUID } from 'node:crypto';
 import http from 'node:http';
+import { networkOf } from '@/lib/domain/shared/network-of';
 import { env } from './env';
 
 /** Set by us on every request before Next sees it; whatever a client sent under these names is dropped. */
@@ -36,16 +37,16 @@ export function markRequests(): void {
   } as typeof emit;
 }
 
-/** The client's address: the socket's, or behind N trusted proxies the Nth entry from the right of X-Forwarded-For. */
+/** The client's address: the socket's, or behind N trusted proxies the Nth entry from the right of X-Forwarded-For. IPv6 by network. */
 export function clientAddress(headers: Headers): string {
   const hops = env().TRUSTED_PROXIES;
   if (hops > 0) {
     const chain = (headers.get('x-forwarded-for') ?? '').split(',').map((part) => part.trim());
     // Next adds the socket's own address only when the header is absent, so the list is the proxies' alone.
     const at = chain[chain.length - hops];
-    if (at) return at;
+    if (at) return networkOf(at);
   }
-  return headers.get(PEER_HEADER) ?? 'unknown';
+  return networkOf(headers.get(PEER_HEADER) ?? 'unknown');
 }
 
 /** The id that this request's log lines carry; also shown to a person when something breaks. */
