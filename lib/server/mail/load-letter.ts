@@ -1,5 +1,6 @@
 import 'server-only';
 import type { MailKind } from '@/db/schema/mail';
+import { oneLine } from '@/lib/domain/mail/mail-address';
 import type { MailRow } from './lease-mail';
 import type { Letter, LoadLetter } from './letter';
 import { loadAccountChanged } from './letters/account-changed';
@@ -26,4 +27,4 @@ const LOADERS: Record<MailKind, LoadLetter> = {
 };
 
 export const loadLetter = async (row: MailRow, now: number): Promise<Letter> =>
-  LOADERS[row.kind]({ payload: row.payload, toName: row.toName, now });
+  LOADERS[row.kind]({ payload: row.payload, toName: oneLine(row.toName), now });
