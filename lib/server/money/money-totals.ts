@@ -25,16 +25,21 @@ export function moneyTotals(campId: CampId): MoneyTotals {
     .innerJoin(order, eq(order.id, ledger.orderId))
     .where(eq(order.campId, campId))
     .get();
+  // Each order's due once, in a subquery: written out in every sum, SQLite would work it out for each.
+  const each = db
+    .select({ due: dueSql.as('due') })
+    .from(order)
+    .where(eq(order.campId, campId))
+    .as('each');
   const due = db
     .select({
       orders: sql<number>`count(*)`,
-      owed: sql<number>`coalesce(sum(max(${dueSql}, 0)), 0)`,
-      owing: sql<number>`coalesce(sum(${dueSql} > 0), 0)`,
-      back: sql<number>`coalesce(sum(max(-(${dueSql}), 0)), 0)`,
-      backing: sql<number>`coalesce(sum(${dueSql} < 0), 0)`,
+      owed: sql<number>`coalesce(sum(max(${each.due}, 0)), 0)`,
+      owing: sql<number>`coalesce(sum(${each.due} > 0), 0)`,
+      back: sql<number>`coalesce(sum(max(-${each.due}, 0)), 0)`,
+      backing: sql<number>`coalesce(sum(${each.due} < 0), 0)`,
     })
-    .from(order)
-    .where(eq(order.campId, campId))
+    .from(each)
     .get();
   return {
     orders: due?.orders ?? 0,

@@ -57,7 +57,8 @@ export default async function MoneyPage({
         )}
         <div className="mt-3 flex flex-wrap items-center gap-x-6">
           <p>
-            <span className="figures">{total}</span> {total === 1 ? 'order' : 'orders'}
+            <span className="figures">{total.toLocaleString('en-GB')}</span>{' '}
+            {total === 1 ? 'order' : 'orders'}
             {pages > 1 && `, page ${page} of ${pages}`}
           </p>
           {page > 1 && (

@@ -1,7 +1,7 @@
 import { ScrollRegion } from '@/components/ui/scroll-region';
 import type { LedgerLine } from '@/lib/domain/money/camp-money';
 import { formatMoney } from '@/lib/domain/shared/money';
-import { sayInstant } from '@/lib/domain/shared/say-date';
+import { Stamp } from './stamp';
 
 const ACCOUNT_WORDS = {
   provider: 'At the payment provider',
@@ -24,7 +24,7 @@ export function LedgerTable({ lines, timeZone }: { lines: readonly LedgerLine[];
         <table className="w-full border-collapse text-left">
           <thead>
             <tr>
-              {['When', 'Order', 'What', 'Account'].map((word) => (
+              {[`When (${timeZone})`, 'Order', 'What', 'Account'].map((word) => (
                 <th key={word} scope="col" className={`sticky top-0 bg-board ${CELL}`}>
                   {word}
                 </th>
@@ -39,7 +39,7 @@ export function LedgerTable({ lines, timeZone }: { lines: readonly LedgerLine[];
               const first = lines[at - 1]?.posting !== line.posting;
               return (
                 <tr key={line.id} className={first ? 'border-t border-line' : ''}>
-                  <td className={CELL}>{first && <time>{sayInstant(line.at, timeZone)}</time>}</td>
+                  <td className={CELL}>{first && <Stamp at={line.at} timeZone={timeZone} />}</td>
                   <td className={`figures ${CELL}`}>{first && line.reference}</td>
                   <td className={CELL}>{first && line.memo}</td>
                   <td className={CELL}>{ACCOUNT_WORDS[line.account]}</td>

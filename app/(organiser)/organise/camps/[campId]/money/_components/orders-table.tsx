@@ -3,28 +3,28 @@ import { RegistrationStateMark } from '@/components/orders/registration-state-ma
 import { ScrollRegion } from '@/components/ui/scroll-region';
 import type { MoneyOrder } from '@/lib/domain/money/camp-money';
 import { formatMoney } from '@/lib/domain/shared/money';
-import { sayInstant } from '@/lib/domain/shared/say-date';
+import { Stamp } from './stamp';
 
 const HEAD = 'sticky top-0 bg-board px-2 py-2 align-bottom';
 const FIGURE = 'figures px-2 py-2 text-right align-top';
 
 export function OrdersTable({ orders, timeZone }: { orders: readonly MoneyOrder[]; timeZone: string }) {
   return (
-    <ScrollRegion label="Orders" className="mt-2 max-h-[75vh] border-t-2 border-ink">
+    <ScrollRegion label="Table of orders" className="mt-2 max-h-[75vh] border-t-2 border-ink">
       <table className="w-full border-collapse text-left">
         <thead>
           <tr>
             <th scope="col" className={HEAD}>
               Order
             </th>
-            <th scope="col" className={HEAD}>
+            <th scope="col" className={`${HEAD} max-md:hidden`}>
               Payer
             </th>
             <th scope="col" className={HEAD}>
               State
             </th>
             <th scope="col" className={`${HEAD} max-md:hidden`}>
-              Made
+              Made ({timeZone})
             </th>
             <th scope="col" className={`${HEAD} text-right max-md:hidden`}>
               Total
@@ -40,15 +40,16 @@ export function OrdersTable({ orders, timeZone }: { orders: readonly MoneyOrder[
         <tbody>
           {orders.map((order) => (
             <tr key={order.id} className="border-t border-line">
-              <th scope="row" className="figures px-2 py-2 align-top font-semibold">
-                {order.reference}
+              <th scope="row" className="px-2 py-2 align-top font-normal">
+                <span className="figures font-semibold">{order.reference}</span>
+                <span className="block break-words text-small md:hidden">{order.payer}</span>
               </th>
-              <td className="break-words px-2 py-2 align-top">{order.payer}</td>
+              <td className="break-words px-2 py-2 align-top max-md:hidden">{order.payer}</td>
               <td className="px-2 py-2 align-top">
                 <RegistrationStateMark state={order.state} />
               </td>
               <td className="px-2 py-2 align-top max-md:hidden">
-                <time>{sayInstant(order.createdAt, timeZone)}</time>
+                <Stamp at={order.createdAt} timeZone={timeZone} />
               </td>
               <td className={`${FIGURE} max-md:hidden`}>{formatMoney(order.total, order.currency)}</td>
               <td className={`${FIGURE} max-md:hidden`}>{formatMoney(order.paid, order.currency)}</td>

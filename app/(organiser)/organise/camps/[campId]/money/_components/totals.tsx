@@ -10,7 +10,7 @@ export function Totals({ totals, currency }: { totals: MoneyTotals; currency: st
     ['Places sold', totals.sold, orders(totals.orders, ' in all')],
   ];
   return (
-    <dl className="grid border-t-2 border-ink sm:grid-cols-2 xl:grid-cols-5">
+    <dl className="-mt-4 grid sm:grid-cols-2 xl:grid-cols-5">
       {rows.map(([word, amount, note]) => (
         <div key={word} className="border-b border-line py-3 pr-4">
           <dt className="text-soft">{word}</dt>
@@ -24,4 +24,5 @@ export function Totals({ totals, currency }: { totals: MoneyTotals; currency: st
   );
 }
 
-const orders = (count: number, more = ''): string => `${count} ${count === 1 ? 'order' : 'orders'}${more}`;
+const orders = (count: number, more = ''): string =>
+  `${count.toLocaleString('en-GB')} ${count === 1 ? 'order' : 'orders'}${more}`;

@@ -40,7 +40,7 @@ export function PeoplePager({ campId, page, query, change, mayExport }: PeoplePa
             <span className="figures">
               {from + 1}–{from + page.rows.length}
             </span>{' '}
-            of <span className="figures">{page.total}</span> people
+            of <span className="figures">{page.total.toLocaleString('en-GB')}</span> people
           </>
         )}
       </p>
