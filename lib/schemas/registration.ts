@@ -126,7 +126,7 @@ export const harpsFormSchema = harpsSchema.extend({
   ...route,
   /** `add` notes the harp of the three lists and stays; anything else goes on. */
   intent: z.enum(['add', 'next']).default('next'),
-  addKey: z.union([z.literal(''), pitchClassSchema]).default(''),
+  addKey: pitchClassSchema.optional(),
   addTuning: tuningSchema.default('richter'),
   addRegister: registerSchema.default('standard'),
 });

@@ -10,7 +10,7 @@ import { type Refusal, refuse } from '../errors';
 
 /** Replaces the harps an attendee owns; their packing list follows at once. None is an answer too. */
 export function saveOwnHarps(input: z.output<typeof ownHarpsSchema>): Result<null, Refusal> {
-  if (input.intent === 'add' && input.addKey === '')
+  if (input.intent === 'add' && input.addKey === undefined)
     return refuse('bad_input', { fields: { addKey: ['Choose the key of the harp to add.'] } });
   const { registrationId } = input;
   const harpIds = ownedHarpIds(input);

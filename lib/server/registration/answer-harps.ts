@@ -14,7 +14,7 @@ export async function answerHarps(
 ): Promise<Result<null, Refusal>> {
   const sale = requireOnSale(input.slug, now);
   if (!sale.ok) return sale;
-  if (input.intent === 'add' && input.addKey === '')
+  if (input.intent === 'add' && input.addKey === undefined)
     return refuse('bad_input', { fields: { addKey: ['Choose the key of the harp to add.'] } });
   await keepAnswer(sale.value.programme.camp, { harps: { harpIds: ownedHarpIds(input) } }, now);
   return ok(null);
