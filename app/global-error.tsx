@@ -11,9 +11,7 @@ export default function GlobalError({ error, reset }: GlobalErrorProps) {
     <html lang="en">
       <body>
         <title>Something went wrong · Combwood</title>
-        <main id="main" className="mx-auto max-w-page px-4 pt-8 sm:px-6">
-          <BrokenPage reference={error.digest} again={reset} />
-        </main>
+        <BrokenPage reference={error.digest} again={reset} />
       </body>
     </html>
   );

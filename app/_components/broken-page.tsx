@@ -1,16 +1,45 @@
-import { Button } from '@/components/ui/button';
-import { DeadEnd } from '@/components/ui/dead-end';
+import { StripHoles } from '@/components/harp/strip-holes';
+import { buttonClass } from '@/components/ui/button-class';
 
-/** Never the error's own message: its reference, which the log has too. */
+// One reed missing, as in DeadEnd.
+const LOOKS = [
+  'filled',
+  'filled',
+  'filled',
+  'open',
+  'filled',
+  'filled',
+  'filled',
+  'filled',
+  'filled',
+  'filled',
+] as const;
+
+/**
+ * Never the error's own message: its reference, which the log has too. Sent along with every page, so it is built of
+ * little and leads on by a plain link.
+ */
 export function BrokenPage({ reference, again }: { reference?: string; again: () => void }) {
   return (
-    <DeadEnd title="Something went wrong on our side" beside={<Button onClick={again}>Try again</Button>}>
-      <p>Nothing that you sent was lost. Try again; if it stays, write to the organiser of your camp.</p>
+    <main id="main" className="mx-auto max-w-page px-4 py-14 sm:px-6">
+      <StripHoles looks={LOOKS} className="max-w-64" />
+      <h1 className="mt-6">Something went wrong on our side</h1>
+      <p className="mt-4 max-w-prose text-lead">
+        Nothing that you sent was lost. Try again; if it stays, write to the organiser of your camp.
+      </p>
       {reference && (
-        <p className="text-base text-soft">
+        <p className="mt-3 text-soft">
           Reference <span className="figures">{reference}</span>
         </p>
       )}
-    </DeadEnd>
+      <p className="mt-8 flex flex-wrap gap-4">
+        <button type="button" onClick={again} className={buttonClass('plain')}>
+          Try again
+        </button>
+        <a href="/" className={buttonClass('plain')}>
+          See all camps
+        </a>
+      </p>
+    </main>
   );
 }

@@ -1,7 +1,7 @@
 'use client';
 
 import { type ReactNode, useActionState } from 'react';
-import { type ButtonTone, buttonClass } from '../ui/button';
+import { type ButtonTone, buttonClass } from '../ui/button-class';
 import type { FormState } from './action-form';
 
 type ActionButtonProps = {

@@ -8,7 +8,7 @@ import {
   useForm,
 } from '@conform-to/react';
 import { type FormEvent, type ReactNode, startTransition, useActionState, useEffect, useRef } from 'react';
-import { type ButtonTone, buttonClass } from '../ui/button';
+import { type ButtonTone, buttonClass } from '../ui/button-class';
 import { ErrorSummary } from './error-summary';
 
 export type FormState = SubmissionResult<string[]> | null;

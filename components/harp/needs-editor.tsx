@@ -4,7 +4,7 @@ import { type FieldName, useField, useFormMetadata } from '@conform-to/react';
 import type { NeedLevel } from '@/lib/domain/harp/harp-ask';
 import { SelectField } from '../forms/select-field';
 import { TextField } from '../forms/text-field';
-import { buttonClass } from '../ui/button';
+import { buttonClass } from '../ui/button-class';
 import { AskFields } from './ask-fields';
 import { NEW_ASK, type TypedAsk } from './typed-ask';
 
