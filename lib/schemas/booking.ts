@@ -3,13 +3,14 @@ import { emailSchema } from './account';
 import { harpsFormSchema } from './registration';
 import { rowId } from './row-id';
 
-/** A mail's link. A key of a wrong shape is a wrong key, not a fault of the address. */
-const query = z.object({ key: z.string().max(200).catch('') });
+// A mail's link. What has the wrong shape is a wrong link and led to the page that says so, not answered with a fault.
+const loose = z.string().max(200).catch('');
+const query = z.object({ key: loose });
 const orderId = z.object({ orderId: rowId('ord') });
 const registrationId = z.object({ registrationId: rowId('reg') });
 
-export const orderLinkSchema = z.object({ params: orderId, query });
-export const registrationLinkSchema = z.object({ params: registrationId, query });
+export const orderLinkSchema = z.object({ params: z.object({ orderId: loose }), query });
+export const registrationLinkSchema = z.object({ params: z.object({ registrationId: loose }), query });
 export const orderParamsSchema = z.object({ params: orderId });
 export const receiptParamsSchema = z.object({
   params: orderId.extend({ number: z.coerce.number().int().min(1) }),

@@ -7,7 +7,7 @@ import { getDb } from '../db';
 
 /**
  * What the asker may see: orders they pay for, and places others booked for them. By account, by an address that the
- * account has proven, or by a link of a mail. Newest camp first; two statements.
+ * account has proven, or by a link of a mail. Newest camp first; one statement.
  */
 export function listOwnBookings(actor: Actor) {
   const proven = actor.user?.emailVerified ? actor.user.email : null;
