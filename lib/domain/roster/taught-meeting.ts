@@ -19,6 +19,9 @@ export type TaughtMeeting = {
   whose: string;
   with: string[];
   needs: HarpNeed[];
+  /** How many come. */
+  count: number;
+  /** By name; left out where everyone comes, since the whole camp is no roster. */
   players: RosterPlayer[];
 };
 
@@ -42,6 +45,8 @@ export const namedNeeds = (
       any: new Set(need.anyOf.map((ask) => harpId(harpFromAsk(ask)))),
     }));
 
-/** Which of the needs the owned harps meet. An id that names no harp meets none. */
-export const meets = (needs: readonly HarpNeed[], owned: ReadonlySet<string>): boolean[] =>
-  namedNeeds(needs).map(({ any }) => [...any].some((id) => owned.has(id)));
+/** Which of the named needs the owned harps meet. An id that names no harp meets none. */
+export const meets = (
+  named: readonly { any: ReadonlySet<HarpId> }[],
+  owned: ReadonlySet<string>,
+): boolean[] => named.map(({ any }) => [...any].some((id) => owned.has(id)));

@@ -2,7 +2,7 @@ import 'server-only';
 import { and, asc, eq } from 'drizzle-orm';
 import { track } from '@/db/schema/camp';
 import { registration, registrationHarp, registrationWorkshop } from '@/db/schema/order';
-import { meets, type RosterPlayer, type TaughtMeeting } from '@/lib/domain/roster/taught-meeting';
+import { meets, namedNeeds, type RosterPlayer, type TaughtMeeting } from '@/lib/domain/roster/taught-meeting';
 import type { CampId, InstructorId, RegistrationId, TrackId, WorkshopId } from '@/lib/domain/shared/ids';
 import { takesPart } from '@/lib/domain/timetable/own-meetings';
 import type { Programme } from '@/lib/domain/timetable/programme';
@@ -27,6 +27,16 @@ export function listTaught(programme: Programme, instructorId: InstructorId): Ta
     if (!workshop) return [];
     const { day, starts, lengthMinutes, id } = meeting;
     const room = programme.rooms.find((one) => one.id === meeting.roomId);
+    const coming = players.filter((player) =>
+      takesPart(workshop, { trackId: player.trackId, electives: electives.get(player.id) ?? [] }),
+    );
+    const named = namedNeeds(workshop.needs);
+    const toRoster = ({ id: playerId, name, track: inTrack }: Player): RosterPlayer => ({
+      id: playerId,
+      name,
+      track: inTrack,
+      has: meets(named, harps.get(playerId) ?? new Set()),
+    });
     const tracks = programme.tracks.filter((one) => workshop.trackIds.includes(one.id));
     return [
       {
@@ -46,18 +56,8 @@ export function listTaught(programme: Programme, instructorId: InstructorId): Ta
           .filter((one) => one.id !== instructorId && workshop.instructorIds.includes(one.id))
           .map(({ name }) => name),
         needs: workshop.needs,
-        players: players
-          .filter((player) =>
-            takesPart(workshop, { trackId: player.trackId, electives: electives.get(player.id) ?? [] }),
-          )
-          .map(
-            ({ id: playerId, name, track: inTrack }): RosterPlayer => ({
-              id: playerId,
-              name,
-              track: inTrack,
-              has: meets(workshop.needs, harps.get(playerId) ?? new Set()),
-            }),
-          ),
+        count: coming.length,
+        players: workshop.audience === 'everyone' ? [] : coming.map(toRoster),
       },
     ];
   });

@@ -7,7 +7,7 @@ import { Roster } from './roster';
 
 /** One meeting: where, with what, in which keys, and who comes. */
 export function TaughtCard({ meeting }: { meeting: TaughtMeeting }) {
-  const { players, needs } = meeting;
+  const { players, count, needs } = meeting;
   return (
     <article className="grid gap-x-8 gap-y-3 border-b border-line py-5 lg:grid-cols-[22rem_1fr]">
       <div>
@@ -43,7 +43,11 @@ export function TaughtCard({ meeting }: { meeting: TaughtMeeting }) {
           </ul>
         )}
         {players.length === 0 ? (
-          <p className="text-soft">Nobody confirmed yet.</p>
+          <p className="text-soft">
+            {count === 0
+              ? 'Nobody confirmed yet.'
+              : `Everyone comes: ${count.toLocaleString('en-GB')} players.`}
+          </p>
         ) : (
           <details open={players.length <= 12}>
             <summary className="inline-flex min-h-target items-center font-semibold">
