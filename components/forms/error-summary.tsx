@@ -5,8 +5,16 @@ type ErrorSummaryProps = {
   /** By field name; the empty name is the form itself. */
   errors: Record<string, unknown>;
   formId: string;
+  /** Words for a field; `needs[]` speaks for all of a list: "Harp 2". */
   labels?: Record<string, string>;
 };
+
+function labelOf(name: string, labels: Record<string, string> = {}): string {
+  const [, list, index] = /^(\w+)\[(\d+)\]/.exec(name) ?? [];
+  const words = list && labels[`${list}[]`];
+  if (words) return `${words} ${Number(index) + 1}: `;
+  return labels[name] ? `${labels[name]}: ` : '';
+}
 
 /** Everything that stands in the way, each a link to its field. */
 export function ErrorSummary({ ref, errors, formId, labels }: ErrorSummaryProps) {
@@ -23,7 +31,7 @@ export function ErrorSummary({ ref, errors, formId, labels }: ErrorSummaryProps)
                   (said as string[]).join(' ')
                 ) : (
                   <a href={`#${formId}-${name}`}>
-                    {labels?.[name] ? `${labels[name]}: ` : ''}
+                    {labelOf(name, labels)}
                     {(said as string[]).join(' ')}
                   </a>
                 )}

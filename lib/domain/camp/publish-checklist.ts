@@ -23,6 +23,14 @@ const have = (count: number): string => (count === 1 ? 'has' : 'have');
  */
 export function publishChecklist(programme: Programme, today: string): ChecklistItem[] {
   const clashes = clashItems(programme);
+  const { tracks, workshops, meetings } = programme;
+  // A rule about nothing is neither missing nor done.
+  const about = (rows: readonly unknown[], codes: readonly string[]) => (rows.length === 0 ? codes : []);
+  const moot = [
+    ...about(tracks, ['gates', 'core-workshops', 'track-places']),
+    ...about(workshops, ['core-meetings', 'meetings', 'elective-places', 'instructors', 'harps']),
+    ...about(meetings, ['meeting-days', 'clashes', 'fit']),
+  ];
   return [
     ...dateItems(programme, today),
     ...saleItems(programme),
@@ -30,7 +38,7 @@ export function publishChecklist(programme: Programme, today: string): Checklist
     ...clashes.musts,
     ...adviceItems(programme),
     ...clashes.shoulds,
-  ];
+  ].filter(({ code }) => !moot.includes(code));
 }
 
 /** True when nothing that must be there is missing. */

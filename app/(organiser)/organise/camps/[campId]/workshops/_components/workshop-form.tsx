@@ -33,6 +33,7 @@ export function WorkshopForm({ campId, workshopId, defaultValue, tracks, instruc
       submit={submit}
       hidden={{ campId, ...(workshopId && { workshopId }) }}
       defaultValue={defaultValue}
+      labels={{ 'needs[]': 'Harp' }}
       className="grid max-w-4xl gap-10"
     >
       {/* Enter in a field presses the form's first button, which must not be one that takes a harp out. */}
