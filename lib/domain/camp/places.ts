@@ -5,6 +5,6 @@ export type Places = { capacity: number; taken: number; left: number };
 export type CampPlaces = {
   camp: Places;
   tracks: { id: TrackId; places: Places }[];
-  /** Electives with a limit of their own; those without are left out. */
+  /** By their own limit, else the seats of their smallest room; those with neither are left out. */
   electives: { id: WorkshopId; places: Places }[];
 };

@@ -1,8 +1,8 @@
 import 'server-only';
-import { and, count, eq, inArray } from 'drizzle-orm';
-import { camp, track } from '@/db/schema/camp';
+import { and, count, eq, inArray, min } from 'drizzle-orm';
+import { camp, room, track } from '@/db/schema/camp';
 import { registration, registrationWorkshop } from '@/db/schema/order';
-import { workshop } from '@/db/schema/workshop';
+import { meeting, workshop } from '@/db/schema/workshop';
 import type { CampPlaces, Places } from '@/lib/domain/camp/places';
 import { SEATED_STATES } from '@/lib/domain/registration/states';
 import type { CampId } from '@/lib/domain/shared/ids';
@@ -46,10 +46,14 @@ export function countPlaces(campId: CampId, db: Db | Tx = getDb()): CampPlaces |
     .from(track)
     .where(eq(track.campId, campId))
     .all();
+  // Without a limit of its own an elective takes as many as the smallest room it meets in seats.
   const electives = db
-    .select({ id: workshop.id, capacity: workshop.capacity })
+    .select({ id: workshop.id, capacity: workshop.capacity, seats: min(room.seats) })
     .from(workshop)
+    .leftJoin(meeting, eq(meeting.workshopId, workshop.id))
+    .leftJoin(room, eq(room.id, meeting.roomId))
     .where(and(eq(workshop.campId, campId), eq(workshop.audience, 'elective')))
+    .groupBy(workshop.id)
     .all();
   return {
     camp: places(
@@ -57,8 +61,9 @@ export function countPlaces(campId: CampId, db: Db | Tx = getDb()): CampPlaces |
       [...byTrack.values()].reduce((sum, taken) => sum + taken, 0),
     ),
     tracks: tracks.map(({ id, capacity }) => ({ id, places: places(capacity, byTrack.get(id) ?? 0) })),
-    electives: electives.flatMap(({ id, capacity }) =>
-      capacity === null ? [] : [{ id, places: places(capacity, byWorkshop.get(id) ?? 0) }],
-    ),
+    electives: electives.flatMap(({ id, capacity, seats }) => {
+      const limit = capacity ?? seats;
+      return limit === null ? [] : [{ id, places: places(limit, byWorkshop.get(id) ?? 0) }];
+    }),
   };
 }
