@@ -12,7 +12,8 @@ import { openPage, signIn } from './sign-in';
 
 const PLAYER = {
   name: 'Inês Guimarães Falcão',
-  email: 'ines@players.example',
+  // An address of its own each run, as the mail server keeps what earlier runs were sent.
+  email: `ines-${Date.now()}@players.example`,
   track: /First bends/,
   harps: ['C'],
   elective: 'Train rhythms',
