@@ -2,13 +2,16 @@ import { Temporal } from 'temporal-polyfill';
 import type { Db } from '@/db/client';
 import { user } from '@/db/schema/account';
 import { membership, organisation } from '@/db/schema/organisation';
+import { type Actor, VISITOR } from '@/lib/domain/access/actor';
 import type { StaffRole } from '@/lib/domain/access/roles';
 import type { RegistrationState } from '@/lib/domain/registration/states';
 import type { Id, OrganisationId, UserId } from '@/lib/domain/shared/ids';
 import { localDay } from '@/lib/domain/shared/local-time';
 import { minor } from '@/lib/domain/shared/money';
 import { hashPassword } from '@/lib/server/auth/hash-password';
+import { addPicture } from '@/lib/server/pictures/add-picture';
 import { DEMO_PASSWORD, SIGN_INS } from './demo-sign-ins.mjs';
+import { DEMO_PICTURES, pngOf } from './draw-picture';
 import { demoNames } from './people-names';
 import { seedCamp } from './seed-camp';
 import { seedArrivals, seedPastArrivals, seedRegistrations, settleMail } from './seed-registrations';
@@ -82,6 +85,12 @@ export async function seedDemo(db: Db, now: number): Promise<void> {
     price: minor(43_000),
     state: 'closed',
   });
+  const organiser = actorOf(people.organiser, organisationId);
+  for (const { alt, draw } of DEMO_PICTURES)
+    for (const { id } of [selling, arriving]) {
+      const added = await addPicture({ campId: id, alt, file: await pngOf(draw) }, { actor: organiser, now });
+      if (!added.ok) throw new Error(added.error.sentence ?? added.error.code);
+    }
   const names = demoNames(240);
   const random = seededRandom(1857);
   // Oskar, the first name, is the attendee who can sign in.
@@ -120,6 +129,13 @@ export async function seedDemo(db: Db, now: number): Promise<void> {
   settleMail(db, 'oskar@players.example', now);
 }
 
+/** The organiser as the use-cases know them. */
+const actorOf = (id: UserId, organisationId: OrganisationId): Actor => ({
+  ...VISITOR,
+  user: { id, name: 'Ana Teixeira', email: 'ana@slateridge.example', emailVerified: true },
+  roles: [{ organisationId, role: 'organiser' }],
+});
+
 /** Who of today's camp is not simply confirmed; indexes into its list of people. */
 const TODAY = {
   held: [131, 136],
@@ -141,7 +157,7 @@ async function seedPeople(
   db: Db,
   organisationId: OrganisationId,
   now: number,
-): Promise<{ instructor: UserId; attendee: UserId; door: UserId }> {
+): Promise<{ organiser: UserId; instructor: UserId; attendee: UserId; door: UserId }> {
   const passwordHash = await hashPassword(DEMO_PASSWORD);
   for (const { role, email, name } of SIGN_INS) {
     const id = `usr_demo${role}` as UserId;
@@ -159,5 +175,10 @@ async function seedPeople(
       })
       .run();
   }
-  return { instructor: 'usr_demoinstructor', attendee: 'usr_demoattendee', door: 'usr_demodoor' };
+  return {
+    organiser: 'usr_demoorganiser',
+    instructor: 'usr_demoinstructor',
+    attendee: 'usr_demoattendee',
+    door: 'usr_demodoor',
+  };
 }
