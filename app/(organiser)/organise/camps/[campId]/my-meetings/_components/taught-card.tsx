@@ -50,7 +50,7 @@ export function TaughtCard({ meeting }: { meeting: TaughtMeeting }) {
           </p>
         ) : (
           <details open={players.length <= 12}>
-            <summary className="inline-flex min-h-target items-center font-semibold">
+            <summary className="min-h-target py-2 font-semibold">
               {players.length} {players.length === 1 ? 'player' : 'players'}
             </summary>
             <Roster meeting={meeting} />

@@ -57,9 +57,9 @@ export function PersonFacts({ person, campId, timeZone, mayReadNeeds }: PersonFa
         </p>
       )}
       <section aria-labelledby="order" className="border-t-2 border-ink pt-4">
-        <h3 id="order">
+        <h2 id="order" className="text-h3">
           Order <span className="figures">{person.reference}</span>
-        </h3>
+        </h2>
         <dl className="mt-2 grid gap-x-6 gap-y-2 sm:grid-cols-[9rem_1fr]">
           <Fact word="State">
             <RegistrationStateMark state={person.orderState} />
