@@ -15,7 +15,7 @@ export default async function AccountPage() {
   if (!user) return null;
   return (
     <>
-      <PageHead title="Your account" lead={<span className="break-all">{user.email}</span>} />
+      <PageHead title="Your account" lead={<span className="wrap-anywhere">{user.email}</span>} />
       <div className="grid gap-x-16 gap-y-12 lg:grid-cols-2">
         <section aria-labelledby="name">
           <h2 id="name" className="mb-4 text-h3">

@@ -23,7 +23,7 @@ export default async function VerifyPage({ searchParams }: VerifyPageProps) {
         lead={
           <>
             {link.kind === 'change' ? 'Your account moves to ' : 'This letter went to '}
-            <strong className="break-all text-ink">{link.email}</strong>.
+            <strong className="wrap-anywhere text-ink">{link.email}</strong>.
           </>
         }
       />

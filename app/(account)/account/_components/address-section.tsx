@@ -13,7 +13,7 @@ export function AddressSection({ email, verified }: AddressSectionProps) {
         E-mail
       </h2>
       <p className="mb-4 flex flex-wrap items-center gap-x-4">
-        <span className="break-all">{email}</span>
+        <span className="wrap-anywhere">{email}</span>
         <StateMark tone={verified ? 'done' : 'wait'}>
           {verified ? 'confirmed' : 'not confirmed yet'}
         </StateMark>

@@ -29,8 +29,8 @@ export default async function InvitationPage({ params }: PageProps<'/invitations
         title={`${ROLE_WORDS[offer.role]}: will you join?`}
         lead={
           <>
-            {offer.invitedBy} invites <strong className="break-all text-ink">{offer.email}</strong> to work
-            for {offer.organisationName}.
+            {offer.invitedBy} invites <strong className="wrap-anywhere text-ink">{offer.email}</strong> to
+            work for {offer.organisationName}.
           </>
         }
       />
@@ -71,8 +71,8 @@ function WayThere({ user, email, token }: WayThereProps) {
     return (
       <Notice title="First confirm your address">
         <p>
-          Press the link in the letter that we sent to <span className="break-all">{email}</span>, then open
-          this page again.
+          Press the link in the letter that we sent to <span className="wrap-anywhere">{email}</span>, then
+          open this page again.
         </p>
         <p className="mt-3">
           <ButtonLink href={'/account' as Route}>Have it sent again</ButtonLink>
@@ -81,8 +81,8 @@ function WayThere({ user, email, token }: WayThereProps) {
     );
   return (
     <Notice tone="stop" title="This is for another address">
-      You are signed in as <span className="break-all">{user.email}</span>. Sign out, and sign in or open an
-      account as <span className="break-all">{email}</span>.
+      You are signed in as <span className="wrap-anywhere">{user.email}</span>. Sign out, and sign in or open
+      an account as <span className="wrap-anywhere">{email}</span>.
     </Notice>
   );
 }

@@ -20,8 +20,8 @@ export default async function SignUpSentPage() {
         lead={
           opening ? (
             <>
-              We wrote to <strong className="break-all text-ink">{opening.email}</strong>. The letter has a
-              link; press it and your account is ready.
+              We wrote to <strong className="wrap-anywhere text-ink">{opening.email}</strong>. The letter has
+              a link; press it and your account is ready.
             </>
           ) : (
             'We wrote to the address that you gave. The letter has a link; press it and your account is ready.'
@@ -31,7 +31,7 @@ export default async function SignUpSentPage() {
       {meant && (
         <Notice title="Is that address right?">
           <p>
-            It looks like <strong className="break-all">{meant}</strong> with a slip of the finger. If so,{' '}
+            It looks like <strong className="wrap-anywhere">{meant}</strong> with a slip of the finger. If so,{' '}
             <Link href={'/sign-up' as Route}>open the account again</Link> with the right one.
           </p>
         </Notice>

@@ -25,7 +25,7 @@ export function InvitationList({ invitations, organisationId, now }: InvitationL
             className="flex flex-wrap items-center justify-between gap-x-8 gap-y-2 border-b border-line py-3"
           >
             <div className="min-w-0">
-              <p className="break-all font-semibold">{email}</p>
+              <p className="wrap-anywhere font-semibold">{email}</p>
               <p className="text-small text-soft">
                 {ROLE_WORDS[role]} · the link {expiresAt > now ? 'works until' : 'worked until'}{' '}
                 {sayInstant(expiresAt, 'UTC')}

@@ -17,7 +17,7 @@ export function StaffList({ people, organisationId }: StaffListProps) {
         >
           <div className="min-w-0">
             <p className="break-words font-semibold">{person.name}</p>
-            <p className="break-all text-small text-soft">{person.email}</p>
+            <p className="wrap-anywhere text-small text-soft">{person.email}</p>
           </div>
           <ul aria-label={`Roles of ${person.name}`} className="grid gap-1">
             {person.roles.map(({ membershipId, role, since }) => (
@@ -37,8 +37,8 @@ export function StaffList({ people, organisationId }: StaffListProps) {
                   </summary>
                   <div className="border-l-4 border-reed py-2 pl-4">
                     <p className="mb-3">
-                      {person.name} loses at once what {ROLE_WORDS[role].toLowerCase()} may do. You can invite
-                      them again later.
+                      From that moment {person.name} is no longer {ROLE_WORDS[role].toLowerCase()} here. You
+                      can invite them again later.
                     </p>
                     <ActionForm
                       action={revokeRoleAction}
