@@ -2,7 +2,7 @@ import 'server-only';
 import { cookies } from 'next/headers';
 import { cache } from 'react';
 import type { Actor } from '@/lib/domain/access/actor';
-import { ORDERS_COOKIE } from './order-grants';
+import { ordersCookieName } from './order-grants';
 import { readActor } from './read-actor';
 import { sessionCookieName } from './session-cookie';
 
@@ -10,7 +10,7 @@ import { sessionCookieName } from './session-cookie';
 export const getActor = cache(async (): Promise<Actor> => {
   const jar = await cookies();
   return readActor(
-    { session: jar.get(sessionCookieName())?.value, orders: jar.get(ORDERS_COOKIE)?.value },
+    { session: jar.get(sessionCookieName())?.value, orders: jar.get(ordersCookieName())?.value },
     Date.now(),
   );
 });

@@ -2,9 +2,10 @@ import 'server-only';
 import { createHmac, timingSafeEqual } from 'node:crypto';
 import { isId, type OrderId, type RegistrationId } from '@/lib/domain/shared/ids';
 import { env } from '../env';
+import { cookieName } from './session-cookie';
 
 /** The cookie that lets a browser see bookings without an account: `id.proof` pairs parted by spaces. */
-export const ORDERS_COOKIE = 'combwood_orders';
+export const ordersCookieName = (): string => cookieName('combwood_orders');
 const MOST = 12;
 
 /** A payer is granted the order; an attendee who does not pay, their registration only. */

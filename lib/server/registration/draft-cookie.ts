@@ -16,3 +16,8 @@ export async function writeDraftToken(token: string): Promise<void> {
     maxAge: DRAFT_DAYS * 24 * 60 * 60,
   });
 }
+
+/** At sign-out: half-filled answers hold health details, and the next person at this browser is somebody else. */
+export async function clearDraftToken(): Promise<void> {
+  (await cookies()).set(cookieName(NAME), '', { ...cookieFlags(), maxAge: 0 });
+}
