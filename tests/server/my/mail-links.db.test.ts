@@ -1,7 +1,7 @@
 import { beforeEach, describe, expect, test, vi } from 'vitest';
 import { GET as openOrder } from '@/app/o/[orderId]/route';
 import { GET as openRegistration } from '@/app/r/[registrationId]/route';
-import { ORDERS_COOKIE, orderProof } from '@/lib/server/auth/order-grants';
+import { orderProof, ordersCookieName } from '@/lib/server/auth/order-grants';
 import { readActor } from '@/lib/server/auth/read-actor';
 import { fakeRequest, useFakeRequest } from '@/tests/setup/fake-request';
 import { useTestDatabase } from '@/tests/setup/test-database';
@@ -20,7 +20,7 @@ const registration = (id: string, key: string) =>
   openRegistration(new Request(`http://localhost:3000/r/${id}?key=${encodeURIComponent(key)}`), {
     params: Promise.resolve({ registrationId: id }),
   });
-const granted = () => readActor({ session: undefined, orders: fakeRequest.jar.get(ORDERS_COOKIE) }, 0);
+const granted = () => readActor({ session: undefined, orders: fakeRequest.jar.get(ordersCookieName()) }, 0);
 
 describe('a link of a mail', () => {
   test('becomes a cookie that scripts and other sites cannot use, and leads on without its key', async () => {

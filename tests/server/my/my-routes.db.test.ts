@@ -13,7 +13,7 @@ import { payment, receipt } from '@/db/schema/money';
 import { registrationHarp } from '@/db/schema/order';
 import { meeting } from '@/db/schema/workshop';
 import { minor } from '@/lib/domain/shared/money';
-import { type Granted, ORDERS_COOKIE, orderProof } from '@/lib/server/auth/order-grants';
+import { type Granted, orderProof, ordersCookieName } from '@/lib/server/auth/order-grants';
 import { inTransaction } from '@/lib/server/db';
 import { loadAttendee } from '@/lib/server/packing/load-attendee';
 import { issueTicket } from '@/lib/server/tickets/issue-ticket';
@@ -59,7 +59,7 @@ beforeEach(() => {
 });
 
 const grant = (...ids: Granted[]) =>
-  fakeRequest.jar.set(ORDERS_COOKIE, ids.map((id) => `${id}.${orderProof(id)}`).join(' '));
+  fakeRequest.jar.set(ordersCookieName(), ids.map((id) => `${id}.${orderProof(id)}`).join(' '));
 const ask = (get: typeof getTickets, params: Record<string, string>) =>
   get(new Request('http://localhost:3000/x'), { params: Promise.resolve(params) });
 
