@@ -3,7 +3,7 @@ import { asc, eq } from 'drizzle-orm';
 import { block, camp, campPicture, instructor, room, track } from '@/db/schema/camp';
 import { organisation } from '@/db/schema/organisation';
 import { harpNeed, meeting, workshop, workshopInstructor, workshopTrack } from '@/db/schema/workshop';
-import type { CampId } from '@/lib/domain/shared/ids';
+import type { CampId, WorkshopId } from '@/lib/domain/shared/ids';
 import type { Programme } from '@/lib/domain/timetable/programme';
 import { type Db, getDb, type Tx } from '../db';
 
@@ -41,12 +41,20 @@ export function loadProgramme(campId: CampId, db: Db | Tx = getDb()): Programme 
     .orderBy(asc(workshopInstructor.instructorId))
     .all();
   const needsOf = db
-    .select({ need: harpNeed })
+    .select({
+      workshopId: harpNeed.workshopId,
+      level: harpNeed.level,
+      anyOf: harpNeed.anyOf,
+      note: harpNeed.note,
+    })
     .from(harpNeed)
     .innerJoin(workshop, eq(workshop.id, harpNeed.workshopId))
     .where(inCamp)
     .orderBy(asc(harpNeed.position), asc(harpNeed.id))
     .all();
+  const tracksBy = byWorkshop(tracksOf);
+  const instructorsBy = byWorkshop(instructorsOf);
+  const needsBy = byWorkshop(needsOf);
 
   return {
     camp: {
@@ -74,11 +82,9 @@ export function loadProgramme(campId: CampId, db: Db | Tx = getDb()): Programme 
       .all(),
     workshops: workshops.map((row) => ({
       ...row,
-      trackIds: tracksOf.filter((of) => of.workshopId === row.id).map((of) => of.trackId),
-      instructorIds: instructorsOf.filter((of) => of.workshopId === row.id).map((of) => of.instructorId),
-      needs: needsOf
-        .filter(({ need }) => need.workshopId === row.id)
-        .map(({ need }) => ({ level: need.level, anyOf: need.anyOf, ...(need.note && { note: need.note }) })),
+      trackIds: tracksBy(row.id).map((of) => of.trackId),
+      instructorIds: instructorsBy(row.id).map((of) => of.instructorId),
+      needs: needsBy(row.id).map(({ level, anyOf, note }) => ({ level, anyOf, ...(note && { note }) })),
     })),
     meetings: db
       .select()
@@ -99,4 +105,15 @@ export function loadProgramme(campId: CampId, db: Db | Tx = getDb()): Programme 
       .orderBy(asc(campPicture.position), asc(campPicture.id))
       .all(),
   };
+}
+
+/** The rows of a workshop, in the order they came, without a search through all of them for each workshop. */
+function byWorkshop<Row extends { workshopId: WorkshopId }>(rows: readonly Row[]) {
+  const by = new Map<WorkshopId, Row[]>();
+  for (const row of rows) {
+    const own = by.get(row.workshopId);
+    if (own) own.push(row);
+    else by.set(row.workshopId, [row]);
+  }
+  return (id: WorkshopId): readonly Row[] => by.get(id) ?? [];
 }
