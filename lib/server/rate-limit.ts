@@ -1,6 +1,6 @@
 import 'server-only';
 import { createHash } from 'node:crypto';
-import { RateLimiterSQLite } from 'rate-limiter-flexible';
+import { RateLimiterMemory, RateLimiterSQLite } from 'rate-limiter-flexible';
 import { type Db, getDb } from './db';
 import { env } from './env';
 import { log } from './log';
@@ -28,11 +28,19 @@ const BUDGETS = {
 
 export type Budget = keyof typeof BUDGETS;
 
-// By connection, so that a test with a database of its own counts in that one.
-const limiters = new WeakMap<Db, Map<Budget, Promise<RateLimiterSQLite>>>();
+// These only keep one client from wearing the server out, and are spent with every click: counted in memory, because
+// in SQLite each would wait for the disk once more. What guards a secret, a mailbox, money or the disk outlives a restart.
+const IN_MEMORY: ReadonlySet<Budget> = new Set(['draft', 'edit', 'read', 'scan']);
 
-function open(budget: Budget): Promise<RateLimiterSQLite> {
+type Limiter = RateLimiterMemory | RateLimiterSQLite;
+
+// By connection, so that a test with a database of its own counts in that one.
+const limiters = new WeakMap<Db, Map<Budget, Promise<Limiter>>>();
+
+async function open(budget: Budget): Promise<Limiter> {
   const { points, seconds } = BUDGETS[budget];
+  if (IN_MEMORY.has(budget))
+    return new RateLimiterMemory({ points: points * env().RATE_LIMIT_SCALE, duration: seconds });
   return new Promise((resolve, reject) => {
     const limiter: RateLimiterSQLite = new RateLimiterSQLite(
       {
@@ -42,7 +50,6 @@ function open(budget: Budget): Promise<RateLimiterSQLite> {
         keyPrefix: budget,
         points: points * env().RATE_LIMIT_SCALE,
         duration: seconds,
-        // Below this many tries the memory answers; SQLite counts the rest, so that a restart forgives nothing.
         clearExpiredByTimeout: true,
       },
       (error?: Error) => (error ? reject(error) : resolve(limiter)),
@@ -50,15 +57,15 @@ function open(budget: Budget): Promise<RateLimiterSQLite> {
   });
 }
 
-function limiterOf(budget: Budget): Promise<RateLimiterSQLite> {
-  const held = limiters.get(getDb()) ?? new Map<Budget, Promise<RateLimiterSQLite>>();
+function limiterOf(budget: Budget): Promise<Limiter> {
+  const held = limiters.get(getDb()) ?? new Map<Budget, Promise<Limiter>>();
   limiters.set(getDb(), held);
   const limiter = held.get(budget) ?? open(budget);
   held.set(budget, limiter);
   return limiter;
 }
 
-/** Keys are hashed: the table holds no addresses or e-mails. */
+/** Keys are hashed: neither table nor memory holds addresses or e-mails. */
 const keyOf = (text: string): string => createHash('sha256').update(text).digest('base64url').slice(0, 22);
 
 /** Takes one point; false when the budget is spent. */
