@@ -134,6 +134,7 @@ export const registration = sqliteTable(
     index('registration_order').on(t.orderId),
     index('registration_search').on(t.campId, t.attendeeSearch),
     index('registration_attendee').on(t.attendeeUserId),
+    index('registration_attendee_email').on(t.attendeeEmail),
   ],
 );
 

@@ -1,0 +1,1 @@
+CREATE INDEX `registration_attendee_email` ON `registration` (`attendee_email`);
