@@ -25,6 +25,7 @@ export function ProgrammeBoard({ programme }: { programme: Programme }) {
 type Arrival = { day: string; from: string };
 
 function BoardGrid({ board: { times, days }, arrival }: { board: Board; arrival: Arrival }) {
+  const ends = new Map(times.map((time) => [time, rowEnd(days, time)]));
   return (
     <div
       className="programme-board"
@@ -35,19 +36,33 @@ function BoardGrid({ board: { times, days }, arrival }: { board: Board; arrival:
         {times.map((time, row) => (
           <span key={time} className="programme-time figures" style={{ gridRow: row + 2 }}>
             {time}
+            {ends.get(time) && <span className="programme-until">to {ends.get(time)}</span>}
           </span>
         ))}
       </div>
       {days.map((day) => (
-        <DayColumn key={day.day} day={day} times={times} arrival={arrival} />
+        <DayColumn key={day.day} day={day} times={times} ends={ends} arrival={arrival} />
       ))}
     </div>
   );
 }
 
-type DayColumnProps = { day: BoardDay; times: readonly string[]; arrival: Arrival };
+/** When all that starts at this time ends together on every day, said once at the row's head; else null. */
+function rowEnd(days: readonly BoardDay[], time: string): string | null {
+  const ends = new Set(
+    days.flatMap(({ slots }) => slots.filter(({ starts }) => starts === time).map((slot) => slot.ends)),
+  );
+  return ends.size === 1 ? ([...ends][0] ?? null) : null;
+}
 
-function DayColumn({ day: { day, slots }, times, arrival }: DayColumnProps) {
+type DayColumnProps = {
+  day: BoardDay;
+  times: readonly string[];
+  ends: ReadonlyMap<string, string | null>;
+  arrival: Arrival;
+};
+
+function DayColumn({ day: { day, slots }, times, ends, arrival }: DayColumnProps) {
   const free = times.filter((time) => !slots.some(({ starts }) => starts === time));
   return (
     <section className="programme-day" aria-label={sayDay(day)}>
@@ -64,11 +79,11 @@ function DayColumn({ day: { day, slots }, times, arrival }: DayColumnProps) {
           aria-hidden="true"
         />
       ))}
-      {slots.map(({ starts, ends, meetings }) => (
+      {slots.map(({ starts, meetings }) => (
         <div key={starts} className="programme-slot" style={{ gridRow: times.indexOf(starts) + 2 }}>
           <p className="programme-slot-time">
             <time>{starts}</time>
-            {ends && <span className="block text-small font-normal text-soft">to {ends}</span>}
+            {ends.get(starts) && <span className="programme-until">to {ends.get(starts)}</span>}
           </p>
           <ul className="min-w-0 space-y-2">
             {meetings.map((meeting) => (
@@ -81,7 +96,7 @@ function DayColumn({ day: { day, slots }, times, arrival }: DayColumnProps) {
                 </a>
                 <span className="block break-words text-soft">
                   {[meeting.who, meeting.room].filter(Boolean).join(' · ')}
-                  {!ends && `, until ${meeting.ends}`}
+                  {!ends.get(starts) && `, until ${meeting.ends}`}
                 </span>
               </li>
             ))}

@@ -42,9 +42,7 @@ function WorkshopEntry({ workshop, programme }: { workshop: ProgrammeWorkshop; p
     .filter(({ id }) => workshop.instructorIds.includes(id))
     .map(({ name }) => name);
   const own = tracks.filter(({ id }) => workshop.trackIds.includes(id)).map(({ name }) => name);
-  const times = meetings
-    .filter(({ workshopId }) => workshopId === workshop.id)
-    .map(({ day, starts }) => `${sayShortDay(day)} ${starts}`);
+  const times = meetingTimes(meetings.filter(({ workshopId }) => workshopId === workshop.id));
   return (
     <li id={workshop.id} className="grid scroll-mt-6 gap-x-8 gap-y-2 py-4 target:bg-panel sm:grid-cols-2">
       <div className="min-w-0">
@@ -56,7 +54,7 @@ function WorkshopEntry({ workshop, programme }: { workshop: ProgrammeWorkshop; p
           {workshop.capacity !== null && ` · at most ${workshop.capacity} people`}
         </p>
         {teachers.length > 0 && <p className="mt-1 text-small">With {listWords(teachers)}</p>}
-        {times.length > 0 && <p className="mt-1 text-small text-soft">{listWords(times, 'and', 6)}</p>}
+        {times && <p className="mt-1 text-small text-soft">{times}</p>}
       </div>
       <div className="min-w-0">
         {workshop.description && <PlainText text={workshop.description} />}
@@ -72,5 +70,21 @@ function WorkshopEntry({ workshop, programme }: { workshop: ProgrammeWorkshop; p
         )}
       </div>
     </li>
+  );
+}
+
+/** "Mon 15 February and Tue 16 February at 09:30"; each with its own time where they differ. */
+function meetingTimes(meetings: Programme['meetings']): string {
+  const starts = [...new Set(meetings.map((meeting) => meeting.starts))];
+  if (starts.length === 1)
+    return `${listWords(
+      meetings.map(({ day }) => sayShortDay(day)),
+      'and',
+      8,
+    )} at ${starts[0]}`;
+  return listWords(
+    meetings.map((meeting) => `${sayShortDay(meeting.day)} ${meeting.starts}`),
+    'and',
+    6,
   );
 }

@@ -26,7 +26,7 @@ export function SiteHead({ actor, wide = false, signOut }: SiteHeadProps) {
           className="mb-2.5 inline-block pt-0.5 font-head text-[1.75rem] font-extrabold leading-none tracking-tight text-pine no-underline"
         >
           Combwood
-          <TenHoleStrip mode="mark" className="mt-1 w-[7.9rem]" />
+          <TenHoleStrip mode="mark" className="mt-1 max-w-[7.9rem]" />
         </Link>
         <nav
           aria-label="Site"
