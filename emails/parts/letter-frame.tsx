@@ -33,16 +33,22 @@ export function LetterFrame({ preview, title, children, foot }: LetterFrameProps
         <style>{NIGHT}</style>
       </Head>
       <Preview>{preview}</Preview>
-      <Body className="board" style={{ margin: 0, padding: '24px 12px', background: LETTER.board }}>
-        <Container className="ink" style={{ maxWidth: 600, margin: '0 auto', fontFamily: LETTER.font }}>
-          <Heading as="h1" style={{ ...LETTER.head, fontSize: 30, margin: '0 0 20px' }}>
-            {title}
-          </Heading>
-          {children}
-          <Section className="soft" style={{ marginTop: 32, borderTop: `1px solid ${LETTER.edge}` }}>
-            <Text style={{ ...LETTER.small, margin: '12px 0 0' }}>{foot}</Text>
-          </Section>
-        </Container>
+      {/* The ground is a table of ours: Body would paint an inner cell that no class reaches, and night would be white. */}
+      <Body className="board" style={{ margin: 0 }}>
+        <Section className="board" style={{ background: LETTER.board }}>
+          <Container
+            className="ink"
+            style={{ maxWidth: 600, margin: '0 auto', padding: '24px 12px', fontFamily: LETTER.font }}
+          >
+            <Heading as="h1" style={{ ...LETTER.head, fontSize: 30, margin: '0 0 20px' }}>
+              {title}
+            </Heading>
+            {children}
+            <Section className="soft" style={{ marginTop: 32, borderTop: `1px solid ${LETTER.edge}` }}>
+              <Text style={{ ...LETTER.small, margin: '12px 0 0' }}>{foot}</Text>
+            </Section>
+          </Container>
+        </Section>
       </Body>
     </Html>
   );
