@@ -32,3 +32,9 @@ export async function ticketPicture(id: string): Promise<Buffer> {
   if (!qr) throw new Error('The mail shows no picture by cid');
   return Buffer.from(await (await fetch(base() + qr.url)).arrayBuffer());
 }
+
+/** The plain text part of a mail. */
+export async function letterText(id: string): Promise<string> {
+  const letter = (await (await fetch(`${base()}/api/messages/${id}`)).json()) as { text: string | null };
+  return letter.text ?? '';
+}
