@@ -15,20 +15,19 @@ type MoveButtonsProps = {
 export function MoveButtons({ campId, list, id, name, first, last }: MoveButtonsProps) {
   const button = (towards: 'up' | 'down', edge: boolean) =>
     edge ? (
-      <span className="min-w-target" />
+      <span className="w-11" />
     ) : (
       <ActionButton
         action={moveRowAction}
         hidden={{ campId, list, id, towards }}
         label={`Move ${name} ${towards}`}
-        tone="quiet"
-        className="min-w-target no-underline"
+        className="w-11 px-0"
       >
         <span aria-hidden="true">{towards === 'up' ? '↑' : '↓'}</span>
       </ActionButton>
     );
   return (
-    <div className="flex">
+    <div className="flex gap-2">
       {button('up', first)}
       {button('down', last)}
     </div>

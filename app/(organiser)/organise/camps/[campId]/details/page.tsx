@@ -4,6 +4,7 @@ import { CheckField } from '@/components/forms/check-field';
 import { TextField } from '@/components/forms/text-field';
 import { PageHead } from '@/components/ui/page-head';
 import { loadProgramme } from '@/lib/server/camps/load-programme';
+import type { CampRow } from '@/lib/server/camps/own-camp';
 import { priceText } from '@/lib/server/camps/read-price';
 import { requireCamp } from '@/lib/server/camps/require-camp';
 import { countPlaces } from '@/lib/server/registration/count-places';
@@ -24,7 +25,7 @@ export default async function DetailsPage({ params }: PageProps<'/organise/camps
         action={editCampAction}
         submit="Save"
         hidden={{ campId: camp.id, version: camp.version }}
-        defaultValue={{ ...camp, price: priceText(camp.price, camp.currency) }}
+        defaultValue={detailsOf(camp)}
         className="grid max-w-prose gap-10"
       >
         <FieldGroup title="What and when">
@@ -110,3 +111,21 @@ export default async function DetailsPage({ params }: PageProps<'/organise/camps
     </>
   );
 }
+
+/** What the form begins with: its own fields, not the row. */
+const detailsOf = (camp: CampRow) => ({
+  name: camp.name,
+  slug: camp.slug,
+  startsOn: camp.startsOn,
+  endsOn: camp.endsOn,
+  arrivalFrom: camp.arrivalFrom,
+  timeZone: camp.timeZone,
+  venueName: camp.venueName,
+  venueAddress: camp.venueAddress,
+  capacity: camp.capacity,
+  currency: camp.currency,
+  price: priceText(camp.price, camp.currency),
+  refundTerms: camp.refundTerms,
+  summary: camp.summary,
+  description: camp.description,
+});

@@ -40,7 +40,7 @@ export default async function InstructorsPage({
           <p className="mt-4">{add}</p>
         </Empty>
       )}
-      <ol className={instructors.length > 0 ? 'border-t-2 border-ink' : 'hidden'}>
+      <ol className={instructors.length > 0 ? '-mt-6' : 'hidden'}>
         {instructors.map((instructor, at) => {
           const taught = workshops.filter(({ instructorIds }) => instructorIds.includes(instructor.id));
           return (

@@ -31,7 +31,7 @@ export default async function PicturesPage({
         lead="Shown on the public page in this order. Ask the people in them first."
       />
       {pictures.length > 0 && (
-        <ol className="mb-12 border-t-2 border-ink">
+        <ol className="-mt-6 mb-12">
           {pictures.map(({ id, alt, width, height }, at) => (
             <li
               key={id}

@@ -38,7 +38,7 @@ export default async function RoomsPage({
           <p className="mt-4">{add}</p>
         </Empty>
       )}
-      <ol className={rooms.length > 0 ? 'border-t-2 border-ink' : 'hidden'}>
+      <ol className={rooms.length > 0 ? '-mt-6' : 'hidden'}>
         {rooms.map((room, at) => (
           <li
             key={room.id}

@@ -28,7 +28,7 @@ export default async function TimesPage({
           <p>Common is: two in the morning, two in the afternoon, one in the evening.</p>
         </Empty>
       ) : (
-        <ol className="max-w-prose border-t-2 border-ink">
+        <ol className="-mt-6 max-w-prose">
           {blocks.map(({ id, starts, ends, label }) => (
             <li key={id} className="flex flex-wrap items-center gap-x-6 border-b border-line">
               <Link

@@ -42,7 +42,7 @@ export default async function TracksPage({
           <p className="mt-4">{add}</p>
         </Empty>
       )}
-      <ol className={tracks.length > 0 ? 'border-t-2 border-ink' : 'hidden'}>
+      <ol className={tracks.length > 0 ? '-mt-6' : 'hidden'}>
         {tracks.map((track, at) => {
           const own = places.find(({ id }) => id === track.id)?.places;
           return (

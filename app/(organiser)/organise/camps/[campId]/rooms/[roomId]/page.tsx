@@ -16,7 +16,11 @@ export default async function RoomPage({ params }: PageProps<'/organise/camps/[c
   return (
     <>
       <PageHead over={`${camp.name} · Room`} title={room.name} />
-      <RoomForm campId={camp.id} roomId={room.id} defaultValue={room} />
+      <RoomForm
+        campId={camp.id}
+        roomId={room.id}
+        defaultValue={{ name: room.name, seats: room.seats, loudness: room.loudness, kit: room.kit }}
+      />
       <DeleteBox what="this room" action={deleteRoomAction} hidden={{ campId: camp.id, roomId: room.id }} />
     </>
   );

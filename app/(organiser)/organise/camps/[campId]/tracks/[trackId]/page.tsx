@@ -25,7 +25,13 @@ export default async function TrackPage({ params }: PageProps<'/organise/camps/[
         trackId={track.id}
         taken={places?.taken ?? 0}
         campPrice={camp.price === null ? null : formatMoney(camp.price, camp.currency)}
-        defaultValue={{ ...track, price: priceText(track.price, camp.currency) }}
+        defaultValue={{
+          name: track.name,
+          level: track.level,
+          gate: track.gate,
+          capacity: track.capacity,
+          price: priceText(track.price, camp.currency),
+        }}
       />
       <DeleteBox
         what="this track"
