@@ -63,12 +63,21 @@ async function reconcilePayment(
   });
 }
 
+/** A page loaded over and over asks the provider no more often than this. */
+const ASK_AGAIN_AFTER = 2_000;
+
 /** The same for one order, at once: for the page that a payer comes back to before the webhook. */
 export async function reconcileOrder(orderId: OrderId, now: number): Promise<void> {
   const live = getDb()
     .select()
     .from(payment)
-    .where(and(eq(payment.orderId, orderId), inArray(payment.state, ['opening', 'open'])))
+    .where(
+      and(
+        eq(payment.orderId, orderId),
+        inArray(payment.state, ['opening', 'open']),
+        lte(payment.updatedAt, now - ASK_AGAIN_AFTER),
+      ),
+    )
     .all();
   for (const row of live) await reconcilePayment(row, now);
 }
