@@ -21,7 +21,7 @@ export function CampStandingNote({ standing, registerHref, email }: CampStanding
   const { mark, says } = NOTES[standing];
   return (
     <div>
-      <p>{mark}</p>
+      {mark && <p>{mark}</p>}
       <p className="mt-1 text-small text-soft">
         {says}
         {standing === 'full' && (
@@ -37,8 +37,9 @@ export function CampStandingNote({ standing, registerHref, email }: CampStanding
 
 const NOTES = {
   full: {
-    mark: <StateMark tone="stop">Full</StateMark>,
-    says: 'Every place is taken or kept for someone who is paying. One may come back: this page shows it when it does.',
+    // The strip above says "Full" already.
+    mark: null,
+    says: 'Every place is taken or kept for someone who is paying. One may come back: the strip shows it. Then load this page again to register.',
   },
   closed: {
     mark: <StateMark tone="off">Registration is closed</StateMark>,
