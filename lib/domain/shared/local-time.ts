@@ -37,6 +37,12 @@ export const localClock = (at: number, timeZone: string): string =>
     .toPlainTime()
     .toString({ smallestUnit: 'minute' });
 
+/** "2026-06-08 14:05" of an instant in a zone: day and clock by one conversion, which is what costs. */
+export function localMinute(at: number, timeZone: string): string {
+  const then = Temporal.Instant.fromEpochMilliseconds(at).toZonedDateTimeISO(timeZone).toPlainDateTime();
+  return then.toString({ smallestUnit: 'minute' }).replace('T', ' ');
+}
+
 /** "10:00" + 75 → "11:15"; runs on past midnight ("23:00" + 120 → "01:00"). Whole minutes; sums, since lists call it a lot. */
 export function clockAfter(starts: string, minutes: number): string {
   const [hour = 0, minute = 0] = starts.split(':').map(Number);

@@ -11,11 +11,14 @@ export function minor(amount: number): Minor {
 
 export const addMinor = (...parts: Minor[]): Minor => minor(parts.reduce((sum, part) => sum + part, 0));
 
+// The package looks through its whole table for each question; a list of people asks tens of thousands of times.
+const DIGITS = new Map(currencies.data.map(({ code, digits }) => [code, digits]));
+
 /** Digits after the point by ISO 4217 (JPY 0, EUR 2, BHD 3); `Intl` differs for HUF and others. Throws if unknown. */
 export function currencyDigits(code: string): number {
-  const entry = currencies.code(code);
-  if (!entry) throw new RangeError(`Unknown currency: ${code}`);
-  return entry.digits;
+  const digits = DIGITS.get(code.toUpperCase());
+  if (digits === undefined) throw new RangeError(`Unknown currency: ${code}`);
+  return digits;
 }
 
 export const isCurrency = (code: string): boolean => currencies.code(code) !== undefined;

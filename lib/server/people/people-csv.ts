@@ -2,7 +2,7 @@ import 'server-only';
 import { ARRIVAL_WORDS } from '@/lib/domain/door/arrival-states';
 import type { PeopleRow } from '@/lib/domain/people/people-row';
 import { STATE_WORDS } from '@/lib/domain/registration/states';
-import { localClock, localDay } from '@/lib/domain/shared/local-time';
+import { localMinute } from '@/lib/domain/shared/local-time';
 import { minor, plainMoney } from '@/lib/domain/shared/money';
 
 export const CSV_HEAD = [
@@ -46,6 +46,6 @@ export function csvRecord(row: Exported, electives: string[], harps: string[], t
     money(Math.max(0, row.paid)),
     money(Math.max(0, row.due)),
     money(Math.max(0, -row.due)),
-    `${localDay(row.registeredAt, timeZone)} ${localClock(row.registeredAt, timeZone)}`,
+    localMinute(row.registeredAt, timeZone),
   ];
 }
