@@ -1,12 +1,13 @@
 import type { Db } from '@/db/client';
 import { meeting } from '@/db/schema/workshop';
 import type { CampId, RoomId, TrackId, WorkshopId } from '@/lib/domain/shared/ids';
+import { clockAfter } from '@/lib/domain/shared/local-time';
 import { NOW } from './build-camp';
 import { buildWorkshop } from './build-workshop';
 
 const KEYS = ['C', 'A', 'D', 'G', 'F', 'Bb', 'E'] as const;
 
-/** `count` workshops with a harp each, every fourth an elective, and a meeting each, spread over days and rooms. */
+/** `count` workshops with a harp each, every fourth an elective, and a meeting each, spread over five days, none at the time of another (up to 200). */
 export function buildLargeProgramme(
   db: Db,
   count: number,
@@ -35,8 +36,8 @@ export function buildLargeProgramme(
           workshopId: id,
           roomId: of.roomId,
           day: `2026-06-${String(8 + (at % 5)).padStart(2, '0')}`,
-          starts: `${String(9 + (Math.floor(at / 5) % 10)).padStart(2, '0')}:00`,
-          lengthMinutes: 50,
+          starts: clockAfter('08:00', Math.floor(at / 5) * 20),
+          lengthMinutes: 20,
           updatedAt: NOW,
         })
         .run();
