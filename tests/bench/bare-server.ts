@@ -2,8 +2,9 @@ import { type ChildProcess, spawn, spawnSync } from 'node:child_process';
 import { cpSync, existsSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { ROOT } from '../setup/stack.mjs';
+import { linkPackages } from './link-packages';
 
-const NEXT = join(ROOT, 'node_modules/next/dist/bin/next');
+const NEXT = 'node_modules/next/dist/bin/next';
 
 /**
  * The same Next on the same Node with next to nothing in it: a static page, a page of no data, a handler that answers
@@ -16,7 +17,7 @@ export async function startBareServer(
   const home = join(ROOT, folder, 'bare');
   const env: NodeJS.ProcessEnv = {
     ...process.env,
-    BENCH_ROOT: ROOT,
+    BENCH_ROOT: home,
     NEXT_TELEMETRY_DISABLED: '1',
     NODE_ENV: 'production',
   };
@@ -41,6 +42,8 @@ function build(home: string, env: NodeJS.ProcessEnv): void {
   if (existsSync(stamp) && readFileSync(stamp, 'utf8') === version) return;
   rmSync(home, { recursive: true, force: true });
   cpSync(join(ROOT, 'tests/bench/bare'), home, { recursive: true });
+  // Packages of its own: a build whose root is the project takes the project's proxy and start-up in.
+  linkPackages(['next', 'react', 'react-dom'], join(ROOT, 'node_modules'), join(home, 'node_modules'));
   console.log('Building the bare server …');
   const done = spawnSync(process.execPath, [NEXT, 'build'], { cwd: home, env, encoding: 'utf8' });
   if (done.status !== 0) throw new Error(`The bare server does not build: ${done.stdout}${done.stderr}`);
