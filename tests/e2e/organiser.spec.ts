@@ -77,6 +77,7 @@ test('a teacher opens an account, sets up a camp from nothing and publishes it',
   for (const title of ['Second position', 'Slow blues']) {
     await page.goto(`${camp}/workshops/new`);
     await fill('Title', title);
+    await page.getByLabel('Kind', { exact: true }).selectOption('technique');
     await page.getByRole('radio', { name: /^Core workshop/ }).check();
     await page.getByRole('checkbox', { name: 'Bending' }).check();
     await page.getByRole('checkbox', { name: 'Ida Størmer' }).check();
