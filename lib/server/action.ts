@@ -10,6 +10,7 @@ import type { TargetKind } from './access/find-target';
 import type { Refusal } from './errors';
 import { brokenBy, type Context, climb, isRefusal, sentenceOf } from './ladder';
 import type { Budget } from './rate-limit';
+import { refuseFormShape } from './refuse-form-shape';
 
 /** What a form's `useActionState` holds; null before the first send. */
 export type FormState = SubmissionResult<string[]> | null;
@@ -40,6 +41,8 @@ export type Action = ((previous: FormState, form: FormData) => Promise<FormState
  */
 export function action<Schema extends z.ZodType, Value>(spec: Spec<Schema, Value>): Action {
   const handle = async (_previous: FormState, form: FormData): Promise<FormState> => {
+    const odd = refuseFormShape(form);
+    if (odd) return { status: 'error', error: { '': [sentenceOf(odd)] } };
     const submission = parseWithZod(form, { schema: spec.schema });
     const say = (refusal: Refusal): FormState =>
       submission.reply({
