@@ -9,6 +9,7 @@ import { brokenBy, type Context, climb, isRefusal } from './ladder';
 import { requestId } from './peer-address';
 import { problem } from './problem';
 import type { Budget } from './rate-limit';
+import { readRawBody } from './read-raw-body';
 
 type Params = Record<string, string>;
 type Spec<Schema extends z.ZodType> = {
@@ -69,8 +70,9 @@ function toRefusal(error: z.ZodError): Refusal {
 }
 
 async function readJson(request: Request, limit: number): Promise<{ json: unknown } | Refusal> {
-  const text = await request.text();
-  if (Buffer.byteLength(text) > limit) return { code: 'too_large' };
+  const text = await readRawBody(request, limit);
+  if (text === null)
+    return { code: 'too_large', sentence: `That is more than ${limit} bytes, the most this takes.` };
   try {
     return { json: text === '' ? undefined : JSON.parse(text) };
   } catch {
