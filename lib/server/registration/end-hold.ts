@@ -21,8 +21,7 @@ export async function endHold(
       .where(and(eq(order.id, orderId), eq(order.state, 'held')))
       .run(),
   );
-  const answered = await endSessions(orderId, now);
-  if (answered) inTransaction((tx) => lapseOrder(tx, orderId, now));
+  if ((await endSessions(orderId, now)) === 'ended') inTransaction((tx) => lapseOrder(tx, orderId, now));
   const row = getDb().select({ state: order.state }).from(order).where(eq(order.id, orderId)).get();
   if (row?.state === 'expired') return 'expired';
   if (row?.state === 'confirmed') return 'paid';

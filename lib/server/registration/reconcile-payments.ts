@@ -39,9 +39,10 @@ export async function reconcilePayments(now: number): Promise<number> {
   for (const row of pending) {
     if (!row.providerRefundId) continue;
     const told = await getRefund(row.providerRefundId);
-    if (!told.ok) break;
+    // One that the provider does not know must not keep the others waiting.
+    if (!told.ok && told.error === 'unavailable') break;
     inTransaction((tx) => {
-      if (applyRefund(tx, told.value, now).outcome === 'applied') repaired += 1;
+      if (told.ok && applyRefund(tx, told.value, now).outcome === 'applied') repaired += 1;
       // Waits its turn again.
       else tx.update(refund).set({ updatedAt: now }).where(eq(refund.id, row.id)).run();
     });

@@ -2,6 +2,7 @@ import 'server-only';
 import { and, asc, eq, lte } from 'drizzle-orm';
 import { order } from '@/db/schema/order';
 import { getDb, inTransaction } from '../db';
+import { log } from '../log';
 import { endSessions } from './end-sessions';
 import { lapseOrder } from './lapse-order';
 
@@ -21,8 +22,14 @@ export async function sweepHolds(now: number): Promise<number> {
     .all();
   let ended = 0;
   for (const { id } of due) {
+    const told = await endSessions(id, now);
     // Without an answer there will be none for the next one either; the coming round tries again.
-    if (!(await endSessions(id, now))) break;
+    if (told === 'unavailable') break;
+    if (told === 'refused') {
+      // Its places stay taken until somebody looks, but it holds up nobody else's.
+      log.error({ order: id }, 'hold not ended: the provider does not know its session');
+      continue;
+    }
     if (inTransaction((tx) => lapseOrder(tx, id, now))) ended += 1;
   }
   return ended;

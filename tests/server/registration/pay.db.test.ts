@@ -228,6 +228,17 @@ describe('the hold runs out', () => {
     expect(stateOf(at.db, id)).toBe('expired');
   });
 
+  test('a session that the provider does not know keeps its own place taken, and nobody else’s', async () => {
+    buildFarCamp(at.db);
+    const lost = heldOrder(at.db, NOW, 'lost');
+    await pressPay(at.db, lost, NOW);
+    await desk.control('reset');
+    const next = heldOrder(at.db, NOW + 1, 'next');
+    await pressPay(at.db, next, NOW + 1);
+    await sweepHolds(AFTER_HOLD + 1);
+    expect([stateOf(at.db, lost), stateOf(at.db, next)]).toEqual(['held', 'expired']);
+  });
+
   test('the same answers can be used to try again, also to change them while it runs', async () => {
     const { benders } = buildFarCamp(at.db, { capacity: 1 });
     const id = heldOrder(at.db, NOW, 'browser');
