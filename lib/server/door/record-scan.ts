@@ -27,18 +27,22 @@ export function recordScan(
   // Verified before the transaction, so that a forged code holds no lock.
   const claims = input.kind === 'ticket' ? verifyTicket(input.code) : null;
   return inTransaction((tx) => {
-    const person =
-      input.kind === 'ticket'
-        ? claims && findByTicket(tx, claims.ticketId)
-        : findByRegistration(tx, input.registrationId);
     const known = tx
-      .select({ campId: scan.campId, verdict: scan.verdict })
+      .select({ campId: scan.campId, verdict: scan.verdict, registrationId: scan.registrationId })
       .from(scan)
       .where(eq(scan.id, input.id))
       .get();
     if (known && known.campId !== campId)
       return refuse('bad_input', { fields: { id: ['This id belongs to another scan.'] } });
-    if (known) return ok(answer(tx, campId, known.verdict as DoorVerdict, person));
+    if (known) {
+      // About whom it was then, whatever is sent now: a verdict is never said of somebody else.
+      const then = known.registrationId && findByRegistration(tx, known.registrationId);
+      return ok(answer(tx, campId, known.verdict as DoorVerdict, then || null));
+    }
+    const person =
+      input.kind === 'ticket'
+        ? claims && findByTicket(tx, claims.ticketId)
+        : findByRegistration(tx, input.registrationId);
     // A name pick or an undo names a registration outright: one of another camp is not for this door to learn of.
     if (input.kind !== 'ticket' && person?.campId !== campId) return refuse('not_found');
     const verdict = input.kind === 'undo' ? decideUndo(campId, person) : decideArrival(campId, person);

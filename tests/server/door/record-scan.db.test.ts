@@ -57,6 +57,21 @@ describe('a scan at the door', () => {
     expect(data.db.select().from(scan).all()).toHaveLength(1);
   });
 
+  test('an id used before answers of whom it was then, never of somebody else', () => {
+    const { send, ids, camp } = door();
+    const other = buildRegistration(data.db, {
+      ...camp,
+      trackId: camp.benders,
+      name: 'Oskar Lindqvist',
+      code: '2',
+    });
+    const id = randomUUID();
+    send({ kind: 'name', id, registrationId: ids.registrationId });
+    const again = send({ kind: 'name', id, registrationId: other.registrationId });
+    expect(again).toMatchObject({ value: { person: { registrationId: ids.registrationId } } });
+    expect(arrival(other.registrationId)).toBe('expected');
+  });
+
   test('by name works without the ticket; taken back with a reason; then again', () => {
     const { send, ids } = door();
     const { registrationId } = ids;
