@@ -12,6 +12,8 @@ import { route } from '@/lib/server/route';
 export const GET = route({
   schema: campAddressSchema,
   permission: 'public.read',
+  // Drawing costs a tenth of a second of the processor, as much as a PDF.
+  rate: 'export',
   run: ({ params }) => {
     const found = getPublicCamp(params.slug);
     if (!found) return refuse('not_found');
