@@ -1,5 +1,5 @@
 import { join } from 'node:path';
-import { ensureBuilt, ensureInstalled, ensureSeeded, ROOT, stackEnv, startStack } from '../setup/stack.mjs';
+import { ensureBuilt, ensureSeeded, ROOT, stackEnv, startStack } from '../setup/stack.mjs';
 import { startBareServer } from './bare-server';
 import { fillBench } from './fill-bench';
 import { measureArrival } from './measure-arrival';
@@ -58,7 +58,6 @@ async function overHttp(): Promise<void> {
 }
 
 try {
-  ensureInstalled();
   Object.assign(process.env, stackEnv(port, folder));
   await overHttp();
   await measure('registration', () => measureRegistration(work));
