@@ -22,7 +22,12 @@ export function BottomBar({ name, entries }: { name: string; entries: readonly R
       <ul className="flex flex-[4]">
         {near.map((entry) => (
           <li key={entry.href} className="flex flex-1">
-            <Link href={entry.href} aria-current={isHere(path, entry) ? 'page' : undefined} className={CELL}>
+            <Link
+              href={entry.href}
+              prefetch={false}
+              aria-current={isHere(path, entry) ? 'page' : undefined}
+              className={CELL}
+            >
               {entry.word}
             </Link>
           </li>
@@ -39,6 +44,7 @@ export function BottomBar({ name, entries }: { name: string; entries: readonly R
               <li key={entry.href}>
                 <Link
                   href={entry.href}
+                  prefetch={false}
                   aria-current={isHere(path, entry) ? 'page' : undefined}
                   className="flex min-h-target items-center px-6 text-ink no-underline aria-[current]:font-bold"
                 >

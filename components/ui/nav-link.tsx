@@ -18,6 +18,7 @@ export function NavLink({ href, children, exact = false }: NavLinkProps) {
   return (
     <Link
       href={href}
+      prefetch={false}
       aria-current={here ? 'page' : undefined}
       className="inline-flex min-h-target items-center border-b-4 border-transparent px-1 pt-1 font-semibold text-ink no-underline hover:border-line aria-[current]:border-pine"
     >
