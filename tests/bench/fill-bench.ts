@@ -41,7 +41,14 @@ export function fillBench(file: string): { cookie: string; codes: string[]; regi
   const confirmed = db
     .select({ id: registration.id })
     .from(registration)
-    .where(and(eq(registration.campId, campId), eq(registration.state, 'confirmed')))
+    // The crowd's minors have no consent on record, and the door does not let those in.
+    .where(
+      and(
+        eq(registration.campId, campId),
+        eq(registration.state, 'confirmed'),
+        eq(registration.minor, false),
+      ),
+    )
     .orderBy(asc(registration.id))
     .all();
   const codes = db.transaction((tx) =>
