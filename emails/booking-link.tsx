@@ -27,7 +27,7 @@ export function BookingLink({
     >
       <Para>Hello {payerName},</Para>
       <Para>
-        here is the way to your booking {reference} for {campName}: tickets, timetables, packing lists and
+        Here is the way to your booking {reference} for {campName}: tickets, timetables, packing lists and
         receipts. Keep the link to yourself.
       </Para>
       <PressLink href={bookingUrl}>Open your booking</PressLink>

@@ -28,12 +28,12 @@ export function LatePayment(props: LatePaymentProps) {
       <Para>Hello {props.payerName},</Para>
       {props.paidTwice ? (
         <Para>
-          your booking {props.reference} for {props.campName} was paid for already, and then {sum} came a
+          Your booking {props.reference} for {props.campName} was paid for already, and then {sum} came a
           second time. Your place is safe. The second payment goes back in full.
         </Para>
       ) : (
         <Para>
-          your payment of {sum} for {props.campName} arrived after the time for which the place was kept, and
+          Your payment of {sum} for {props.campName} arrived after the time for which the place was kept, and
           by then no place was left. So you have no place, and all of the money goes back.
         </Para>
       )}

@@ -42,7 +42,7 @@ export function OrderConfirmed(props: OrderConfirmedProps) {
     >
       <Para>Hello {props.payerName},</Para>
       <Para>
-        your booking is confirmed. {camp.name} is on {sayDays(camp.startsOn, camp.endsOn)}
+        Your booking is confirmed. {camp.name} is on {sayDays(camp.startsOn, camp.endsOn)}
         {camp.venueName && ` at ${[camp.venueName, camp.venueAddress].filter(Boolean).join(', ')}`}. The door
         opens on {sayDay(camp.startsOn)} at {camp.arrivalFrom} ({camp.timeZone}).
       </Para>

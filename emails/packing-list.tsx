@@ -5,7 +5,7 @@ import { Para, Part, PressLink, Small } from './parts/letter-parts';
 
 export type PackingListLetterProps = {
   attendeeName: string;
-  camp: { name: string; startsOn: string; endsOn: string };
+  camp: { name: string; startsOn: string; endsOn: string; timeZone: string };
   organisationName: string;
   list: Pick<PackingList, 'lines' | 'days'>;
   url: string;
@@ -54,8 +54,8 @@ export function PackingListLetter({
     >
       <Para>Hello {attendeeName},</Para>
       <Para>
-        these are the harps that your own workshops at {camp.name} ({sayDays(camp.startsOn, camp.endsOn)}) ask
-        for.
+        These are the harps that your own workshops at {camp.name} ({sayDays(camp.startsOn, camp.endsOn)}) ask
+        for. Times are local to the camp ({camp.timeZone}).
       </Para>
       {list.lines.length === 0 && (
         <Para>
@@ -68,6 +68,11 @@ export function PackingListLetter({
       <HarpPart title="Kept for you at camp" lines={of('loaner')} />
       <HarpPart title="Pack from your own" lines={of('owned')} />
       <HarpPart title="Helpful, not required" lines={helpful} />
+      {list.lines.some(({ uses }) => uses.some(({ sentence }) => sentence.includes('→'))) && (
+        <Para>
+          A position says how a song lies on the harp. You need not know it: take the harp after the arrow.
+        </Para>
+      )}
       <PressLink href={url}>See it day by day</PressLink>
       <Para>
         The page behind the button has your timetable and ticket too. Tell it when you get another harp: the

@@ -13,7 +13,7 @@ export function Reset({ name, url, minutes }: ResetProps) {
       foot="You get this because someone asked for a new password for this address. If it was not you, do nothing: your password stays as it is."
     >
       <Para>Hello {name},</Para>
-      <Para>press the button and choose a new password. It signs you out on all other devices.</Para>
+      <Para>Press the button and choose a new password. It signs you out on all other devices.</Para>
       <PressLink href={url}>Set a new password</PressLink>
       <Para>The link works once, for {minutes} minutes.</Para>
     </LetterFrame>

@@ -13,7 +13,7 @@ export function Verify({ name, url, hours }: VerifyProps) {
       foot="You get this because someone signed up at Combwood with this address. If it was not you, do nothing: without the link the account stays shut."
     >
       <Para>Hello {name},</Para>
-      <Para>press the button to confirm that this address is yours. Then your account is ready.</Para>
+      <Para>Press the button to confirm that this address is yours. Then your account is ready.</Para>
       <PressLink href={url}>Confirm my address</PressLink>
       <Para>The link works once, for {hours} hours.</Para>
     </LetterFrame>

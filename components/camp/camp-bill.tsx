@@ -36,7 +36,7 @@ export function CampBill({ camp }: CampBillProps) {
         <h2 className="mt-2 break-words text-bill">
           <Link
             href={`/camps/${camp.slug}` as Route}
-            className="text-pine no-underline decoration-2 underline-offset-8 hover:underline"
+            className="text-pine underline decoration-1 underline-offset-8 hover:decoration-[3px]"
           >
             {camp.name}
           </Link>

@@ -11,6 +11,7 @@ import { CampPictures } from './camp-pictures';
 import { CampPoster } from './camp-poster';
 import { CampStandingNote } from './camp-standing-note';
 import { InstructorList } from './instructor-list';
+import { PageParts } from './page-parts';
 import { PlacesSpot } from './places-spot';
 import { ProgrammeBoard } from './programme-board';
 import { TakingPart } from './taking-part';
@@ -31,6 +32,9 @@ type CampPageProps = {
 export function CampPage({ programme, places, standing, harps, watch }: CampPageProps) {
   const { camp, tracks, instructors } = programme;
   const sells = standing === 'open' || standing === 'full' || standing === 'draft';
+  const namesPosition = programme.workshops.some(({ needs }) =>
+    needs.some(({ anyOf }) => anyOf.some(({ by }) => by !== 'harp')),
+  );
   const { left, of } = toLivePlaces(places).camp;
   return (
     <article>
@@ -45,6 +49,15 @@ export function CampPage({ programme, places, standing, harps, watch }: CampPage
           {watch}
         </div>
       </CampPoster>
+      <PageParts
+        parts={[
+          tracks.length > 0 && { id: 'tracks', title: 'Tracks and harps' },
+          { id: 'programme', title: 'Programme' },
+          { id: 'workshops', title: 'Workshops' },
+          instructors.length > 0 && { id: 'instructors', title: 'Instructors' },
+          { id: 'taking-part', title: 'Taking part' },
+        ]}
+      />
       {camp.description && <PlainText text={camp.description} className="mt-10 text-lead" />}
       <CampPictures pictures={programme.pictures} />
       {tracks.length > 0 && (
@@ -59,7 +72,11 @@ export function CampPage({ programme, places, standing, harps, watch }: CampPage
       <Section id="programme" title="Programme" note={`Times are local: ${camp.timeZone}.`} wide>
         <ProgrammeBoard programme={programme} />
       </Section>
-      <Section id="workshops" title="Workshops">
+      <Section
+        id="workshops"
+        title="Workshops"
+        note={namesPosition && 'A position says how a song lies on the harp. Take the harp after the arrow.'}
+      >
         <WorkshopList programme={programme} />
       </Section>
       {instructors.length > 0 && (

@@ -12,7 +12,7 @@ export function TrackHarps({ track, list }: { track: { name: string }; list: Pac
     <div className="mt-4 space-y-3">
       {required.length > 0 && <Row title="Bring" of={track.name} lines={required} />}
       {helpful.length > 0 && <Row title="Helpful, not required" of={track.name} lines={helpful} />}
-      <details>
+      <details className="print:hidden">
         <summary className="inline-flex min-h-target items-center text-lake underline underline-offset-4">
           Why these harps
         </summary>

@@ -48,7 +48,7 @@ export function ChoiceField({ name, legend, type, choices, hint }: ChoiceFieldPr
           return (
             <label
               key={`${field.key}-${key}`}
-              className="flex min-h-target items-start gap-3 rounded border-2 border-line px-3 py-2 has-checked:border-pine has-disabled:opacity-60"
+              className="flex min-h-target items-start gap-3 rounded border-2 border-line px-3 py-2 has-checked:border-pine has-disabled:border-dashed has-disabled:text-soft"
             >
               <input {...props} disabled={choice.disabled} className="mt-1 size-5 shrink-0 accent-pine" />
               <span>

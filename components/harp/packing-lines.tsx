@@ -94,7 +94,7 @@ function Reason({ uses, lineLevel }: { uses: readonly PackingUse[]; lineLevel: N
         {uses.map(({ meetingId, day, starts }, index) => (
           <Fragment key={meetingId}>
             {index > 0 && ', '}
-            <time dateTime={`${day}T${starts}`} className="whitespace-nowrap">
+            <time dateTime={`${day}T${starts}`} className="whitespace-nowrap font-body tracking-normal">
               {sayShortDay(day)} {starts}
             </time>
           </Fragment>

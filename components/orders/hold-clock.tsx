@@ -42,7 +42,11 @@ export function HoldClock({ until, untilWords, now }: HoldClockProps) {
         </p>
       ) : (
         <p>
-          Until <time dateTime={new Date(until).toISOString()}>{untilWords}</time>:{' '}
+          Until{' '}
+          <time dateTime={new Date(until).toISOString()} className="font-body tracking-normal">
+            {untilWords}
+          </time>
+          :{' '}
           <span aria-hidden="true">
             <span className="figures font-bold">{leftWords(left)}</span> minutes left.
           </span>

@@ -1,7 +1,7 @@
 export type ButtonTone = 'primary' | 'plain' | 'danger' | 'quiet';
 
 const BASE =
-  'inline-flex min-h-target items-center justify-center gap-2 rounded px-4 py-2 font-body font-semibold leading-tight no-underline transition-colors disabled:opacity-60 aria-disabled:opacity-60';
+  'inline-flex min-h-target items-center justify-center gap-2 rounded px-4 py-2 font-body font-semibold leading-tight no-underline transition-colors disabled:opacity-60 aria-disabled:opacity-60 print:hidden';
 const TONES: Record<ButtonTone, string> = {
   // One a screen: brass under ink is the second ink of the board.
   primary: 'bg-brass text-on-brass border-2 border-on-brass/80 hover:border-ink',

@@ -20,7 +20,7 @@ export function NavLink({ href, children, exact = false }: NavLinkProps) {
       href={href}
       prefetch={false}
       aria-current={here ? 'page' : undefined}
-      className="inline-flex min-h-target items-center border-b-4 border-transparent px-1 pt-1 font-semibold text-ink no-underline hover:border-line aria-[current]:border-pine"
+      className="inline-flex min-h-target min-w-0 items-center border-b-4 border-transparent px-1 pt-1 font-semibold text-ink no-underline hover:border-line aria-[current]:border-pine"
     >
       {children}
     </Link>

@@ -1,7 +1,7 @@
 import type { ReactNode } from 'react';
 
 type PageHeadProps = {
-  title: string;
+  title: ReactNode;
   /** Where this page belongs, above the title: a camp's name. */
   over?: ReactNode;
   lead?: ReactNode;

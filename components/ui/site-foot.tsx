@@ -14,7 +14,7 @@ export function SiteFoot({
   /** As wide as the window, as work pages are, and clear of their bar on phones. */ wide?: boolean;
 }) {
   return (
-    <footer className="no-print mt-20 border-t-2 border-ink">
+    <footer className="no-print mt-10 border-t-2 sm:mt-20 border-ink">
       <div
         className={`mx-auto flex flex-wrap items-baseline justify-between gap-x-8 gap-y-2 px-4 py-6 sm:px-6 ${wide ? 'pb-24 lg:pb-6' : 'max-w-page'}`}
       >

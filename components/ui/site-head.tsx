@@ -19,11 +19,11 @@ export function SiteHead({ actor, wide = false, signOut }: SiteHeadProps) {
   return (
     <header className="no-print border-b-2 border-ink">
       <div
-        className={`mx-auto flex flex-wrap items-end justify-between gap-x-8 px-4 pt-3 sm:px-6 ${wide ? '' : 'max-w-page'}`}
+        className={`mx-auto flex flex-wrap items-end justify-between gap-x-4 px-4 pt-2 sm:gap-x-8 sm:px-6 sm:pt-3 ${wide ? '' : 'max-w-page'}`}
       >
         <Link
           href="/"
-          className="mb-2.5 inline-block pt-0.5 font-head text-[1.75rem] font-extrabold leading-none tracking-tight text-pine no-underline"
+          className="mb-2 inline-block shrink-0 pt-0.5 font-head text-[1.75rem] font-extrabold leading-none tracking-tight text-pine no-underline"
         >
           Combwood
           <TenHoleStrip mode="mark" className="mt-1 max-w-[7.9rem]" />
@@ -39,17 +39,17 @@ export function SiteHead({ actor, wide = false, signOut }: SiteHeadProps) {
           {staff && <NavLink href={'/organise' as Route}>Organise</NavLink>}
           {door && <NavLink href={'/door' as Route}>Door</NavLink>}
         </nav>
-        <div className="order-2 flex min-h-target flex-wrap items-center gap-x-4 sm:order-3 sm:ml-auto">
+        <div className="order-2 flex min-h-target min-w-0 flex-1 items-center justify-end gap-x-3 sm:order-3 sm:ml-auto sm:flex-none sm:gap-x-4">
           {actor.user ? (
             <>
               <NavLink href={'/account' as Route}>
                 <span className="max-w-[11rem] truncate">{actor.user.name}</span>
               </NavLink>
               {signOut && (
-                <form action={signOut}>
+                <form action={signOut} className="shrink-0">
                   <button
                     type="submit"
-                    className="inline-flex min-h-target items-center px-1 text-lake underline underline-offset-4 hover:decoration-2"
+                    className="inline-flex min-h-target items-center whitespace-nowrap px-1 text-lake underline underline-offset-4 hover:decoration-2"
                   >
                     Sign out
                   </button>

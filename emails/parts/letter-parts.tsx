@@ -1,5 +1,5 @@
 import { Button, Heading, Section, Text } from '@react-email/components';
-import type { ReactNode } from 'react';
+import { Fragment, type ReactNode } from 'react';
 import { LETTER } from './letter-look';
 
 export function Para({ children }: { children: ReactNode }) {
@@ -36,8 +36,20 @@ export function PressLink({ href, children }: { href: string; children: ReactNod
   );
 }
 
-/** Paragraphs of a text in which blank lines part them. */
+/** A text as it was typed: blank lines part paragraphs, and a line stays a line. */
 export function Lines({ text }: { text: string }) {
   const paragraphs = text.split(/\n\s*\n/).filter((part) => part.trim());
-  return paragraphs.map((part) => <Para key={part}>{part}</Para>);
+  return paragraphs.map((part) => (
+    <Para key={part}>
+      {part
+        .trim()
+        .split(/\r?\n/)
+        .map((line) => (
+          <Fragment key={line}>
+            {line}
+            <br />
+          </Fragment>
+        ))}
+    </Para>
+  ));
 }

@@ -76,17 +76,23 @@ const whoShape = {
 
 const PAYER_EMAIL = 'Give the payer’s e-mail address: the receipt goes there.';
 
+const paidByAnother = (value: unknown): boolean =>
+  typeof value === 'object' && value !== null && 'payer' in value && value.payer === 'other';
+
 /** The payer's own fields count only where somebody else pays: asked for then, dropped otherwise. */
 function withPayer<T extends z.output<z.ZodObject<typeof whoShape>>>(schema: z.ZodType<T>) {
   return schema
-    .superRefine((who, context) => {
-      if (who.payer === 'attendee') return;
-      const say = (path: string, message: string) =>
-        context.addIssue({ code: 'custom', path: [path], message });
-      if (who.payerName === '') say('payerName', 'Give the full name of the person who pays.');
-      const read = email(PAYER_EMAIL).safeParse(who.payerEmail);
-      if (!read.success) say('payerEmail', read.error.issues[0]?.message ?? PAYER_EMAIL);
-    })
+    .superRefine(
+      (who, context) => {
+        const say = (path: string, message: string) =>
+          context.addIssue({ code: 'custom', path: [path], message });
+        if (who.payerName === '') say('payerName', 'Give the full name of the person who pays.');
+        const read = email(PAYER_EMAIL).safeParse(who.payerEmail);
+        if (!read.success) say('payerEmail', read.error.issues[0]?.message ?? PAYER_EMAIL);
+      },
+      // Even when another field is wrong: one look tells all that is missing.
+      { when: ({ value }) => paidByAnother(value) },
+    )
     .transform((who) => (who.payer === 'other' ? who : { ...who, payerName: '', payerEmail: '' }));
 }
 
@@ -121,7 +127,12 @@ export const needsSchema = z.object({
 });
 
 export const trackFormSchema = trackSchema.extend(route);
-export const needsFormSchema = needsSchema.extend(route);
+// Who to call is asked for by `checkNeeds`, together with the guardian: one look tells all that is missing.
+export const needsFormSchema = needsSchema.extend({
+  ...route,
+  emergencyName: line('The name', 120).default(''),
+  emergencyPhone: line('The phone number', 40).default(''),
+});
 export const harpsFormSchema = harpsSchema.extend({
   ...route,
   /** `add` notes the harp of the three lists and stays; anything else goes on. */

@@ -49,6 +49,16 @@ describe('who', () => {
       minor: false,
     });
   });
+  test('empty but for another payer: the payer is asked for in the same answer', () => {
+    const { errors } = post(whoFormSchema, { slug: 'kettle-lake', payer: 'other' });
+    expect(Object.keys(errors).sort()).toEqual([
+      'attendeeEmail',
+      'attendeeName',
+      'minor',
+      'payerEmail',
+      'payerName',
+    ]);
+  });
   test('empty: every question names its remedy, and none a zod message', () => {
     const { errors } = post(whoFormSchema, { slug: 'kettle-lake' });
     expect(errors).toEqual({
@@ -176,6 +186,16 @@ describe('needs', () => {
     const checked = checkNeeds(read.value, { minor, timeZone: 'Europe/Berlin' });
     return checked.ok ? {} : (checked.error.fields ?? {});
   };
+  test('empty for a minor: all that is missing is told at once', () => {
+    expect(Object.keys(check({ emergencyName: '', emergencyPhone: '' }, true)).sort()).toEqual([
+      'consent',
+      'emergencyName',
+      'emergencyPhone',
+      'guardianEmail',
+      'guardianName',
+      'guardianPhone',
+    ]);
+  });
   test.each<[string, Fields, boolean, string, RegExp]>([
     ['nobody to call', { emergencyName: '' }, false, 'emergencyName', /somebody to call/],
     ['no phone', { emergencyPhone: '' }, false, 'emergencyPhone', /phone number/],

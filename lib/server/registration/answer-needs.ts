@@ -40,7 +40,10 @@ export function checkNeeds(
       ];
     return read ?? '';
   };
-  const emergencyPhone = phone('emergencyPhone');
+  if (given.emergencyName === '')
+    fields.emergencyName = ['Give the name of somebody to call if anything happens.'];
+  const emergencyPhone = given.emergencyPhone === '' ? '' : phone('emergencyPhone');
+  if (given.emergencyPhone === '') fields.emergencyPhone = ['Give their phone number.'];
   if (!about.minor) {
     const adult = {
       ...given,

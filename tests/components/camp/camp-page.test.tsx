@@ -29,6 +29,7 @@ describe('the camp page', () => {
       'Bends 4 draw.',
       'Level: Bending',
       'song in E, 2nd position → A harp',
+      'A position says how a song lies on the harp.',
       'Ana Teixeira',
       'Until 60 days before: all but 50 EUR.',
       'office@slateridge.example',

@@ -14,7 +14,7 @@ export function HoldOver({ checkout }: { checkout: Checkout }) {
       <Notice tone="stop" title={over ? 'The time for paying ran out' : 'There is nothing to pay here'}>
         {over
           ? 'The place went back for others. Nothing was charged. If money of yours arrives all the same, you get a place again or all of it back, and an e-mail that says which.'
-          : 'This order was cancelled or given to somebody else.'}
+          : 'This booking was cancelled or given to somebody else.'}
       </Notice>
       {over && (
         <ActionForm action={changeOrderAction} submit="Try again with my answers" hidden={{ orderId: id }} />

@@ -16,7 +16,7 @@ export function PayHeld({ checkout, now }: { checkout: Checkout; now: number }) 
       )}
       <div>
         <p>
-          Order <span className="figures font-bold">{reference}</span>. The receipt and the ticket go to{' '}
+          Booking <span className="figures font-bold">{reference}</span>. The receipt and the ticket go to{' '}
           <span className="break-words font-semibold">{payerEmail}</span>.
         </p>
         <div className="mt-4">

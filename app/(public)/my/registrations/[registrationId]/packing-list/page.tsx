@@ -25,12 +25,19 @@ export default async function PackingListPage({
     <div className="pb-16 print:pb-0">
       <PageHead
         over={`${camp.name}, ${sayDays(camp.startsOn, camp.endsOn)}`}
-        title={`Packing list of ${person.attendeeName}`}
+        title={
+          <>
+            Packing list of <bdi>{person.attendeeName}</bdi>
+          </>
+        }
         lead={
-          <span className="print:hidden">
-            From your own workshops in track {person.trackName}. It changes with the timetable and with the
-            harps you own.
-          </span>
+          <>
+            <span className="print:hidden">
+              From your own workshops in track {person.trackName}. It changes with the timetable and with the
+              harps you own.{' '}
+            </span>
+            <span className="print:text-[11px]">Times are local to the camp ({camp.timeZone}).</span>
+          </>
         }
         actions={<PackingActions person={person} hasMeetings={meetings.length > 0} />}
       />
@@ -50,10 +57,9 @@ export default async function PackingListPage({
         <OwnHarps registrationId={person.id} owned={owned} />
       </section>
       <section className="no-print mt-12" aria-labelledby="own-days">
-        <h2 id="own-days" className="mb-3 border-b-2 border-ink pb-1">
+        <h2 id="own-days" className="mb-4 border-b-2 border-ink pb-1">
           Your timetable
         </h2>
-        <p className="mb-4 max-w-prose text-soft">Times are local to the camp ({camp.timeZone}).</p>
         <OwnDays programme={programme} meetings={meetings} />
       </section>
       <section className="mt-10 max-w-prose print:mt-2" aria-labelledby="care">

@@ -40,6 +40,9 @@ export default async function TicketPage({ params }: PageProps<'/my/registration
           <p>
             Door opens {sayDay(camp.startsOn)}, {camp.arrivalFrom} ({camp.timeZone}).
           </p>
+          {camp.venueName && (
+            <p className="break-words">{[camp.venueName, camp.venueAddress].filter(Boolean).join(', ')}</p>
+          )}
           <p className="no-print mt-2 text-soft">
             Turn the screen bright and hold it flat. No signal at the door? Take a picture of this page now;
             your name works too.

@@ -21,7 +21,7 @@ export function PaidNews({ checkout }: { checkout: Checkout }) {
     <div className="grid justify-items-start gap-6">
       {state === 'confirmed' && (
         <Notice tone="done" title={total > 0 ? `Paid: ${formatMoney(total, currency)}` : 'Nothing to pay'}>
-          Order <span className="figures">{reference}</span>. Your ticket is on its way to{' '}
+          Booking <span className="figures">{reference}</span>. Your ticket is on its way to{' '}
           <span className="break-words font-semibold">{payerEmail}</span>.
         </Notice>
       )}
@@ -38,7 +38,7 @@ export function PaidNews({ checkout }: { checkout: Checkout }) {
       {back && (
         <Notice tone="note" title={`${formatMoney(back.amount, currency)} ${GONE[back.state]}`}>
           {back.reason === 'Paid twice'
-            ? 'This order was paid already, so the second payment goes back in full.'
+            ? 'This booking was paid already, so the second payment goes back in full.'
             : 'Your payment arrived after the place had gone to somebody else, so all of it goes back.'}{' '}
           Banks take a few days to show it.
         </Notice>
