@@ -28,14 +28,21 @@ const PAGES: Record<DemoRole | 'visitor', string[]> = {
     '/organise/new',
     '/organise/organisations/org_demo',
     '/organise/organisations/org_demo/staff',
+    '/organise/organisations/org_demo/details',
     '/organise/organisations/org_demo/camps/new',
     CAMP,
     `${CAMP}/details`,
     `${CAMP}/pictures`,
     `${CAMP}/tracks`,
+    `${CAMP}/tracks/new`,
+    `${CAMP}/tracks/trk_demob0`,
     `${CAMP}/rooms`,
+    `${CAMP}/rooms/new`,
     `${CAMP}/instructors`,
+    `${CAMP}/instructors/new`,
+    `${CAMP}/times`,
     `${CAMP}/workshops`,
+    `${CAMP}/workshops/new`,
     `${CAMP}/workshops/wsh_demob0`,
     `${CAMP}/timetable`,
     `${CAMP}/people`,
@@ -51,6 +58,7 @@ const PAGES: Record<DemoRole | 'visitor', string[]> = {
 
 // Links to follow for pages whose address holds a made-up id.
 const FOLLOW: Partial<Record<DemoRole | 'visitor', { from: string; link: RegExp }[]>> = {
+  organiser: [{ from: `${CAMP}/people`, link: /\/people\/reg_[^/]+$/ }],
   attendee: [
     { from: '/my', link: /^\/my\/orders\/ord_[^/]+$/ },
     { from: '/my', link: /^\/my\/registrations\/reg_[^/]+\/packing-list$/ },
