@@ -33,7 +33,8 @@ const payer: Actor = {
 /** What pages and routes read (and the scan writes), and the most statements each may take. */
 export const READERS = {
   'public list of camps': [3, () => listPublicCamps(NOW)],
-  'public camp page': [17, () => getPublicCamp('kettle-lake-1')],
+  // One of them asks whether anything was written since the programme was kept.
+  'public camp page': [18, () => getPublicCamp('kettle-lake-1')],
   'organiser’s list of camps': [2, () => listCamps(staff('organiser'))],
   'people route': [4, () => listPeople('cmp_1', ALL_PEOPLE)],
   'people route, searched and sorted by what is due': [
