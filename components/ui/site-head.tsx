@@ -19,14 +19,14 @@ export function SiteHead({ actor, wide = false, signOut }: SiteHeadProps) {
   return (
     <header className="no-print border-b-2 border-ink">
       <div
-        className={`mx-auto flex flex-wrap items-end justify-between gap-x-4 px-4 pt-2 sm:gap-x-8 sm:px-6 sm:pt-3 ${wide ? '' : 'max-w-page'}`}
+        className={`mx-auto flex flex-wrap items-end justify-between gap-x-3 px-4 pt-2 sm:gap-x-8 sm:px-6 sm:pt-3 ${wide ? '' : 'max-w-page'}`}
       >
         <Link
           href="/"
-          className="mb-2 inline-block shrink-0 pt-0.5 font-head text-[1.75rem] font-extrabold leading-none tracking-tight text-pine no-underline"
+          className="mb-2 inline-block shrink-0 pt-0.5 font-head text-[1.45rem] font-extrabold leading-none tracking-tight text-pine no-underline sm:text-[1.75rem]"
         >
           Combwood
-          <TenHoleStrip mode="mark" className="mt-1 max-w-[7.9rem]" />
+          <TenHoleStrip mode="mark" className="mt-1 max-w-[6.55rem] sm:max-w-[7.9rem]" />
         </Link>
         <nav
           aria-label="Site"
@@ -39,7 +39,7 @@ export function SiteHead({ actor, wide = false, signOut }: SiteHeadProps) {
           {staff && <NavLink href={'/organise' as Route}>Organise</NavLink>}
           {door && <NavLink href={'/door' as Route}>Door</NavLink>}
         </nav>
-        <div className="order-2 flex min-h-target min-w-0 flex-1 items-center justify-end gap-x-3 sm:order-3 sm:ml-auto sm:flex-none sm:gap-x-4">
+        <div className="order-2 flex min-h-target min-w-0 flex-1 items-center justify-end gap-x-2 sm:order-3 sm:ml-auto sm:flex-none sm:gap-x-4">
           {actor.user ? (
             <>
               <NavLink href={'/account' as Route}>

@@ -24,7 +24,7 @@ export async function SignInsSection({ userId }: { userId: UserId }) {
               <p className="font-semibold">{row.device}</p>
               <p className="text-small text-soft">
                 since{' '}
-                <time dateTime={new Date(row.createdAt).toISOString()}>
+                <time dateTime={new Date(row.createdAt).toISOString()} className="font-body tracking-normal">
                   {sayInstant(row.createdAt, 'UTC')}
                 </time>
               </p>

@@ -32,7 +32,7 @@ export function BookingList({ bookings }: { bookings: readonly Booking[] }) {
             <ul className="mt-2">
               {booking.people.map((person) => (
                 <li key={person.id} className="flex flex-wrap items-center gap-x-4">
-                  <span className="min-w-0 break-words">
+                  <span className="w-full min-w-0 break-words sm:w-auto">
                     {person.attendeeName}, track {person.trackName}
                   </span>
                   {person.state === 'confirmed' && (
