@@ -37,8 +37,8 @@ const paymentOrigin = (): string =>
 export const config = {
   matcher: [
     {
-      source:
-        '/((?!_next/static|_next/image|api/|favicon.ico|icon|fonts/|.*\\.(?:wasm|js|css|svg|png|webp|ics|txt)$).*)',
+      // Not by the ending of a name: `/invitations/x.js` is a page like any other.
+      source: '/((?!_next/static|_next/image|api/|favicon.ico|icon|fonts/).*)',
       missing: [{ type: 'header', key: 'next-router-prefetch' }],
     },
   ],

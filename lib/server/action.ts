@@ -9,6 +9,7 @@ import type { Result } from '@/lib/domain/shared/result';
 import type { TargetKind } from './access/find-target';
 import type { Refusal } from './errors';
 import { brokenBy, type Context, climb, isRefusal, sentenceOf } from './ladder';
+import { requestId } from './peer-address';
 import type { Budget } from './rate-limit';
 import { refuseFormShape } from './refuse-form-shape';
 
@@ -52,22 +53,22 @@ export function action<Schema extends z.ZodType, Value>(spec: Spec<Schema, Value
       });
     const known = await headers();
     const on = spec.on && { kind: spec.on.kind, id: String(form.get(spec.on.field) ?? '') };
-    const climbed = await climb(known, {
-      permission: spec.permission,
-      on,
-      rate: spec.rate ?? 'edit',
-      sameOrigin: true,
-    });
-    if (isRefusal(climbed)) return say(climbed);
-    if (submission.status !== 'success') return submission.reply({ hideFields: spec.hide ?? [] });
     try {
+      const climbed = await climb(known, {
+        permission: spec.permission,
+        on,
+        rate: spec.rate ?? 'edit',
+        sameOrigin: true,
+      });
+      if (isRefusal(climbed)) return say(climbed);
+      if (submission.status !== 'success') return submission.reply({ hideFields: spec.hide ?? [] });
       const result = await spec.run(submission.value as z.output<Schema>, climbed);
       if (!result.ok) return say(result.error);
       await spec.onOk?.(result.value, submission.value as z.output<Schema>);
       return { ...submission.reply({ hideFields: spec.hide ?? [] }), status: 'success' };
     } catch (error) {
       unstable_rethrow(error);
-      return say(brokenBy(error, climbed.requestId));
+      return say(brokenBy(error, requestId(known)));
     }
   };
   return Object.assign(handle, { access: { permission: spec.permission, on: spec.on?.kind ?? null } });

@@ -36,24 +36,26 @@ export function route<Schema extends z.ZodType>(spec: Spec<Schema>): Handler {
   const handle = async (request: Request, at: { params: Promise<Params> }): Promise<Response> => {
     const params = await at.params;
     const reads = request.method === 'GET' || request.method === 'HEAD';
-    const climbed = await climb(request.headers, {
-      permission: spec.permission,
-      on: spec.on && { kind: spec.on.kind, id: params[spec.on.param] ?? '' },
-      rate: spec.rate ?? (reads ? 'read' : 'edit'),
-      sameOrigin: !reads,
-    });
-    if (isRefusal(climbed)) return problem(climbed, requestId(request.headers));
+    const id = requestId(request.headers);
     try {
+      // Inside as well: a full disk shows here first, where the budget is written down.
+      const climbed = await climb(request.headers, {
+        permission: spec.permission,
+        on: spec.on && { kind: spec.on.kind, id: params[spec.on.param] ?? '' },
+        rate: spec.rate ?? (reads ? 'read' : 'edit'),
+        sameOrigin: !reads,
+      });
+      if (isRefusal(climbed)) return problem(climbed, id);
       const body = reads ? undefined : await readJson(request, spec.limit ?? 64 * 1024);
-      if (body && 'code' in body) return problem(body, climbed.requestId);
+      if (body && 'code' in body) return problem(body, id);
       const query = Object.fromEntries(new URL(request.url).searchParams);
       const parsed = spec.schema.safeParse({ params, query, body: body?.json });
-      if (!parsed.success) return problem(toRefusal(parsed.error), climbed.requestId);
+      if (!parsed.success) return problem(toRefusal(parsed.error), id);
       const result = await spec.run(parsed.data, climbed);
-      return result.ok ? result.value : problem(result.error, climbed.requestId);
+      return result.ok ? result.value : problem(result.error, id);
     } catch (error) {
       unstable_rethrow(error);
-      return problem(brokenBy(error, climbed.requestId), climbed.requestId);
+      return problem(brokenBy(error, id), id);
     }
   };
   return Object.assign(handle, { access: { permission: spec.permission, on: spec.on?.kind ?? null } });

@@ -251,6 +251,7 @@ test('each page and route says how it may be shown, kept and framed', async () =
     [`/organise/camps/${OWN}/people`, 'organiser'],
     [`/door/${OWN}`, 'door'],
     ['/nothing-here', 'visitor'],
+    ['/invitations/nobody.js', 'visitor'],
   ] as const) {
     const { headers } = await ask(path, as);
     const policy = headers.get('content-security-policy') ?? '';
