@@ -9,6 +9,8 @@ import { wholeNumber } from './whole-number';
 export const trackSchema = z.object({
   campId: rowId('cmp'),
   trackId: rowId('trk').optional(),
+  /** The row's mark when the form was opened; without one nothing is compared. */
+  seen: z.string().max(64).optional(),
   name: lineText('Name', 60, 'Give the track a name, like Bending.'),
   level: z.enum(TRACK_LEVELS, { error: 'Level is not chosen. Choose the step of the ladder it is for.' }),
   gate: proseText('Gate', 500),

@@ -11,6 +11,8 @@ export const workshopSchema = z
   .object({
     campId: rowId('cmp'),
     workshopId: rowId('wsh').optional(),
+    /** The row's mark when the form was opened; without one nothing is compared. */
+    seen: z.string().max(64).optional(),
     title: lineText('Title', 100, 'Say what is taught or played, like Bends in 2nd position.'),
     description: proseText('Description', 3000),
     kind: z.enum(WORKSHOP_KINDS, { error: 'Kind is not chosen. Choose what it is.' }),

@@ -4,6 +4,8 @@ import { Notice } from '@/components/ui/notice';
 const WORDS = {
   saved: 'Saved.',
   added: 'Added.',
+  'kept-length':
+    'Saved. Meetings that are in the timetable keep the length they were placed with; the list says which differ. To change one, take it out there and place it again.',
   deleted: 'Deleted.',
   made: 'The draft is made. The list below says what is still missing.',
   published: 'The camp is on sale. Its page is public.',

@@ -1,5 +1,5 @@
 import 'server-only';
-import { and, count, eq } from 'drizzle-orm';
+import { and, asc, eq } from 'drizzle-orm';
 import { block } from '@/db/schema/camp';
 import { CAMP_LIMITS } from '@/lib/domain/camp/camp-limits';
 import type { Id } from '@/lib/domain/shared/ids';
@@ -17,11 +17,16 @@ export function saveBlock(
 ): Result<{ blockId: Id<'blk'> }, Refusal> {
   return editOwnCamp(campId, context, (tx) => {
     const words = `${row.starts}–${row.ends}`;
-    const rows = tx.select({ n: count() }).from(block).where(eq(block.campId, campId)).get()?.n ?? 0;
+    const rows = tx.select().from(block).where(eq(block.campId, campId)).orderBy(asc(block.starts)).all();
+    const before = rows.find(({ id }) => id === blockId);
+    if (blockId && !before) return refuse('not_found');
+    // The grid has one row a start: of two blocks with the same start it would hide one.
+    const same = rows.find(({ id, starts }) => id !== blockId && starts === row.starts);
+    if (same) return refuse('bad_input', { fields: { starts: [takenWords(same)] } });
     if (blockId) {
       const own = and(eq(block.id, blockId), eq(block.campId, campId));
-      if (tx.update(block).set(row).where(own).run().changes === 0) return refuse('not_found');
-    } else if (rows >= CAMP_LIMITS.blocks)
+      tx.update(block).set(row).where(own).run();
+    } else if (rows.length >= CAMP_LIMITS.blocks)
       return refuse('bad_input', { sentence: `A day has at most ${CAMP_LIMITS.blocks} times.` });
     const id = blockId ?? newId('blk', context.now);
     if (!blockId)
@@ -36,3 +41,6 @@ export function saveBlock(
     });
   });
 }
+
+const takenWords = ({ starts, ends, label }: { starts: string; ends: string; label: string }): string =>
+  `From: ${starts} is taken by ${label ? `${label}, ` : ''}${starts}–${ends}. Give another start, or change that one.`;

@@ -8,6 +8,7 @@ import type { TrackInput } from '@/lib/schemas/track';
 import { editOwnCamp } from '../camps/edit-own-camp';
 import { endOf } from '../camps/own-rows';
 import { readPrice } from '../camps/read-price';
+import { rowMark } from '../camps/row-mark';
 import { type Refusal, refuse } from '../errors';
 import type { Context } from '../ladder';
 import { newId } from '../new-id';
@@ -15,7 +16,7 @@ import { countPlaces } from '../registration/count-places';
 
 /** Adds a track at the end of the list, or changes one; never to fewer places than are taken. */
 export function saveTrack(
-  { campId, trackId, ...input }: TrackInput,
+  { campId, trackId, seen, ...input }: TrackInput,
   context: Pick<Context, 'actor' | 'now'>,
 ): Result<{ trackId: TrackId }, Refusal> {
   return editOwnCamp(campId, context, (tx, camp) => {
@@ -33,9 +34,12 @@ export function saveTrack(
         .run();
       return ok({ value: { trackId: id }, ...note, subjectId: id, sentence: `Added the track ${row.name}.` });
     }
+    const own = and(eq(track.id, trackId), eq(track.campId, campId));
+    const before = tx.select().from(track).where(own).get();
+    if (!before) return refuse('not_found');
+    if (seen && seen !== rowMark(before)) return refuse('stale');
     const taken = countPlaces(campId, tx)?.tracks.find(({ id }) => id === trackId)?.places.taken;
-    if (taken === undefined) return refuse('not_found');
-    if (row.capacity < taken)
+    if (taken !== undefined && row.capacity < taken)
       return refuse('bad_input', {
         fields: {
           capacity: [
@@ -43,10 +47,7 @@ export function saveTrack(
           ],
         },
       });
-    tx.update(track)
-      .set(row)
-      .where(and(eq(track.id, trackId), eq(track.campId, campId)))
-      .run();
+    tx.update(track).set(row).where(own).run();
     return ok({
       value: { trackId },
       ...note,

@@ -4,27 +4,33 @@ import { harpNeed, workshop, workshopInstructor, workshopTrack } from '@/db/sche
 import { CAMP_LIMITS } from '@/lib/domain/camp/camp-limits';
 import type { CampId, WorkshopId } from '@/lib/domain/shared/ids';
 import { ok, type Result } from '@/lib/domain/shared/result';
+import type { Programme } from '@/lib/domain/timetable/programme';
 import type { WorkshopInput } from '@/lib/schemas/workshop';
 import { editOwnCamp } from '../camps/edit-own-camp';
 import { loadProgramme } from '../camps/load-programme';
 import { newClashes } from '../camps/new-clashes';
 import { countOwn } from '../camps/own-rows';
+import { rowMark } from '../camps/row-mark';
 import type { Tx } from '../db';
 import { type Refusal, refuse } from '../errors';
 import type { Context } from '../ladder';
 import { newId } from '../new-id';
 import { countChosen } from './count-chosen';
 
+/** `keptLength`: meetings in the timetable that go on with a length of their own. */
+export type SavedWorkshop = { workshopId: WorkshopId; keptLength: number };
+
 /** Adds a workshop with its tracks, instructors and harps, or changes one as a whole. */
 export function saveWorkshop(
   input: WorkshopInput,
   context: Pick<Context, 'actor' | 'now'>,
-): Result<{ workshopId: WorkshopId }, Refusal> {
-  const { campId, workshopId, title } = input;
+): Result<SavedWorkshop, Refusal> {
+  const { campId, workshopId, seen, title } = input;
   return editOwnCamp(campId, context, (tx) => {
     const before = loadProgramme(campId, tx);
-    if (!before || (workshopId && !before.workshops.some(({ id }) => id === workshopId)))
-      return refuse('not_found');
+    const row = before?.workshops.find(({ id }) => id === workshopId);
+    if (!before || (workshopId && !row)) return refuse('not_found');
+    if (row && seen && seen !== rowMark(row)) return refuse('stale');
     const refusal = refusalOf(tx, input);
     if (refusal) return { ok: false, error: refusal };
     const id = write(tx, input, context.now);
@@ -35,13 +41,16 @@ export function saveWorkshop(
         sentence: `Its meetings would clash. ${clashes.slice(0, 3).join(' ')} Move a meeting in the timetable first, or leave this as it was.`,
       });
     return ok({
-      value: { workshopId: id },
+      value: { workshopId: id, keptLength: keptLength(after, id, input.lengthMinutes) },
       action: workshopId ? 'workshop.edit' : 'workshop.add',
       subjectId: id,
       sentence: workshopId ? `Changed the workshop ${title}.` : `Added the workshop ${title}.`,
     });
   });
 }
+
+const keptLength = ({ meetings }: Pick<Programme, 'meetings'>, id: WorkshopId, minutes: number): number =>
+  meetings.filter(({ workshopId, lengthMinutes }) => workshopId === id && lengthMinutes !== minutes).length;
 
 function refusalOf(tx: Tx, input: WorkshopInput): Refusal | null {
   const { campId, workshopId, audience, capacity } = input;
@@ -79,7 +88,7 @@ function refusalOf(tx: Tx, input: WorkshopInput): Refusal | null {
 }
 
 function write(tx: Tx, input: WorkshopInput, now: number): WorkshopId {
-  const { campId, workshopId, trackIds, instructorIds, needs, ...row } = input;
+  const { campId, workshopId, seen: _, trackIds, instructorIds, needs, ...row } = input;
   const id = workshopId ?? newId('wsh', now);
   if (workshopId)
     tx.update(workshop)

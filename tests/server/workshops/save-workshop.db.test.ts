@@ -3,6 +3,7 @@ import { registrationWorkshop } from '@/db/schema/order';
 import { meeting } from '@/db/schema/workshop';
 import type { WorkshopInput } from '@/lib/schemas/workshop';
 import { loadProgramme } from '@/lib/server/camps/load-programme';
+import { rowMark } from '@/lib/server/camps/row-mark';
 import { deleteInstructor } from '@/lib/server/instructors/delete-instructor';
 import { deleteRoom } from '@/lib/server/rooms/delete-room';
 import { deleteTrack } from '@/lib/server/tracks/delete-track';
@@ -185,4 +186,40 @@ test('a track never gets fewer places than are taken', () => {
     error: { fields: { capacity: [expect.stringMatching(/1 is less than the 2/)] } },
   });
   expect(saveTrack({ ...track, capacity: 2 }, context).ok).toBe(true);
+});
+
+test('a form opened before somebody else saved is refused as stale, for a workshop and for a track', () => {
+  buildWorkshop(held.db, { id: 'wsh_1a', title: 'Single notes', trackIds: ['trk_1a'] });
+  const input = { ...INPUT, workshopId: 'wsh_1a' as const, trackIds: ['trk_1a' as const], instructorIds: [] };
+  const seen = rowMark(own('wsh_1a'));
+  expect(saveWorkshop({ ...input, seen, title: 'First' }, context).ok).toBe(true);
+  expect(saveWorkshop({ ...input, seen, title: 'Second' }, context)).toMatchObject({
+    error: { code: 'stale' },
+  });
+  // Harps are part of what the form shows.
+  const again = rowMark(own('wsh_1a'));
+  expect(saveWorkshop({ ...input, title: 'First', needs: [] }, context).ok).toBe(true);
+  expect(saveWorkshop({ ...input, seen: again, title: 'Third' }, context).ok).toBe(false);
+  expect(own('wsh_1a')?.title).toBe('First');
+
+  const row = {
+    campId: 'cmp_1',
+    trackId: 'trk_1a',
+    level: 'start',
+    gate: '',
+    price: '',
+    capacity: 9,
+  } as const;
+  const mark = rowMark(loadProgramme('cmp_1')?.tracks[0]);
+  expect(saveTrack({ ...row, name: 'A', seen: mark }, context).ok).toBe(true);
+  expect(saveTrack({ ...row, name: 'B', seen: mark }, context)).toMatchObject({ error: { code: 'stale' } });
+});
+
+test('a new length says how many meetings in the timetable keep their own', () => {
+  buildWorkshop(held.db, { id: 'wsh_1a', title: 'Single notes', trackIds: ['trk_1a'] });
+  place('wsh_1a', 'mtg_1', '09:30');
+  const save = (lengthMinutes: number) =>
+    saveWorkshop({ ...INPUT, workshopId: 'wsh_1a', instructorIds: [], lengthMinutes }, context);
+  expect(save(75)).toMatchObject({ value: { keptLength: 0 } });
+  expect(save(60)).toMatchObject({ value: { keptLength: 1 } });
 });

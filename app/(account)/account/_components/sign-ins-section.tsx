@@ -1,7 +1,7 @@
 import { ActionForm } from '@/components/forms/action-form';
+import { Instant } from '@/components/ui/instant';
 import { StateMark } from '@/components/ui/state-mark';
 import type { UserId } from '@/lib/domain/shared/ids';
-import { sayInstant } from '@/lib/domain/shared/say-date';
 import { listSessions } from '@/lib/server/auth/list-sessions';
 import { signOutEverywhereAction } from '../../sign-out/actions';
 import { endSessionAction } from '../actions';
@@ -23,10 +23,7 @@ export async function SignInsSection({ userId }: { userId: UserId }) {
             <div>
               <p className="font-semibold">{row.device}</p>
               <p className="text-small text-soft">
-                since{' '}
-                <time dateTime={new Date(row.createdAt).toISOString()} className="font-body tracking-normal">
-                  {sayInstant(row.createdAt, 'UTC')}
-                </time>
+                since <Instant at={row.createdAt} />
               </p>
             </div>
             {row.here ? (

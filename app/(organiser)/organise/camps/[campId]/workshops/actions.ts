@@ -11,7 +11,8 @@ export const saveWorkshopAction = action({
   permission: 'camp.edit',
   on: { kind: 'camp', field: 'campId' },
   run: saveWorkshop,
-  onOk: (_, { campId, workshopId }) => goToCamp(campId, '/workshops', workshopId ? 'saved' : 'added'),
+  onOk: ({ keptLength }, { campId, workshopId }) =>
+    goToCamp(campId, '/workshops', keptLength > 0 ? 'kept-length' : workshopId ? 'saved' : 'added'),
 });
 
 export const deleteWorkshopAction = action({

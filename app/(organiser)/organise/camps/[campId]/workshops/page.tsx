@@ -71,7 +71,10 @@ type WorkshopRowProps = { base: string; workshop: Programme['workshops'][number]
 function WorkshopRow({ base, workshop, programme }: WorkshopRowProps) {
   const names = (ids: readonly string[], rows: readonly { id: string; name: string }[]) =>
     listWords(rows.filter(({ id }) => ids.includes(id)).map(({ name }) => name));
-  const meetings = programme.meetings.filter(({ workshopId }) => workshopId === workshop.id).length;
+  const placed = programme.meetings.filter(({ workshopId }) => workshopId === workshop.id);
+  const meetings = placed.length;
+  const lengths = [...new Set(placed.map(({ lengthMinutes }) => lengthMinutes))].sort((a, b) => a - b);
+  const others = lengths.filter((minutes) => minutes !== workshop.lengthMinutes);
   const facts = [
     KIND_WORDS[workshop.kind],
     `${workshop.lengthMinutes} min`,
@@ -101,6 +104,7 @@ function WorkshopRow({ base, workshop, programme }: WorkshopRowProps) {
       </div>
       <p className="text-small text-soft md:pt-3 md:text-right">
         {meetings === 0 ? 'Not placed yet' : `${meetings} ${meetings === 1 ? 'meeting' : 'meetings'}`}
+        {others.length > 0 && `, placed with ${listWords(others.map(String), 'and')} min`}
       </p>
     </li>
   );

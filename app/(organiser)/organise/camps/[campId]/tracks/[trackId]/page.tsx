@@ -5,6 +5,7 @@ import { formatMoney } from '@/lib/domain/shared/money';
 import { loadProgramme } from '@/lib/server/camps/load-programme';
 import { priceText } from '@/lib/server/camps/read-price';
 import { requireCamp } from '@/lib/server/camps/require-camp';
+import { rowMark } from '@/lib/server/camps/row-mark';
 import { countPlaces } from '@/lib/server/registration/count-places';
 import { DeleteBox } from '../../../../../_components/delete-box';
 import { TrackForm } from '../_components/track-form';
@@ -23,6 +24,7 @@ export default async function TrackPage({ params }: PageProps<'/organise/camps/[
       <TrackForm
         campId={camp.id}
         trackId={track.id}
+        seen={rowMark(track)}
         taken={places?.taken ?? 0}
         campPrice={camp.price === null ? null : formatMoney(camp.price, camp.currency)}
         defaultValue={{

@@ -8,18 +8,20 @@ import { saveTrackAction } from '../actions';
 type TrackFormProps = {
   campId: string;
   trackId?: string;
+  /** Mark of the track as this form shows it. */
+  seen?: string;
   defaultValue?: Record<string, unknown>;
   taken: number;
   /** "€460.00", or nothing while the camp has no price. */
   campPrice: string | null;
 };
 
-export function TrackForm({ campId, trackId, defaultValue, taken, campPrice }: TrackFormProps) {
+export function TrackForm({ campId, trackId, seen, defaultValue, taken, campPrice }: TrackFormProps) {
   return (
     <ActionForm
       action={saveTrackAction}
       submit={trackId ? 'Save' : 'Add the track'}
-      hidden={{ campId, ...(trackId && { trackId }) }}
+      hidden={{ campId, ...(trackId && { trackId }), ...(seen && { seen }) }}
       defaultValue={defaultValue}
     >
       <TextField name="name" label="Name" hint="What players see, like Bending or Late starters." />

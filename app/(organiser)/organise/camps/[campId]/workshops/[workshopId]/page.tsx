@@ -4,6 +4,7 @@ import { toTypedAsk } from '@/components/harp/typed-ask';
 import { PageHead } from '@/components/ui/page-head';
 import { loadProgramme } from '@/lib/server/camps/load-programme';
 import { requireCamp } from '@/lib/server/camps/require-camp';
+import { rowMark } from '@/lib/server/camps/row-mark';
 import { DeleteBox } from '../../../../../_components/delete-box';
 import { WorkshopForm } from '../_components/workshop-form';
 import { deleteWorkshopAction } from '../actions';
@@ -26,6 +27,7 @@ export default async function WorkshopPage({
       <WorkshopForm
         campId={camp.id}
         workshopId={id}
+        seen={rowMark(workshop)}
         tracks={programme.tracks}
         instructors={programme.instructors}
         defaultValue={{

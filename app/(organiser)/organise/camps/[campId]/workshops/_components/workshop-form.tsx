@@ -22,16 +22,25 @@ const AUDIENCE_HINTS = {
 type WorkshopFormProps = {
   campId: string;
   workshopId?: string;
+  /** Mark of the workshop as this form shows it. */
+  seen?: string;
   defaultValue?: Record<string, unknown>;
 } & Pick<Programme, 'tracks' | 'instructors'>;
 
-export function WorkshopForm({ campId, workshopId, defaultValue, tracks, instructors }: WorkshopFormProps) {
+export function WorkshopForm({
+  campId,
+  workshopId,
+  seen,
+  defaultValue,
+  tracks,
+  instructors,
+}: WorkshopFormProps) {
   const submit = workshopId ? 'Save' : 'Add the workshop';
   return (
     <ActionForm
       action={saveWorkshopAction}
       submit={submit}
-      hidden={{ campId, ...(workshopId && { workshopId }) }}
+      hidden={{ campId, ...(workshopId && { workshopId }), ...(seen && { seen }) }}
       defaultValue={defaultValue}
       labels={{ 'needs[]': 'Harp' }}
       className="grid max-w-4xl gap-10"

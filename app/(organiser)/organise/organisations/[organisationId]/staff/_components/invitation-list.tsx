@@ -1,8 +1,8 @@
 import { ActionForm } from '@/components/forms/action-form';
+import { Instant } from '@/components/ui/instant';
 import { StateMark } from '@/components/ui/state-mark';
 import { ROLE_WORDS } from '@/lib/domain/access/roles';
 import type { OrganisationId } from '@/lib/domain/shared/ids';
-import { sayInstant } from '@/lib/domain/shared/say-date';
 import type { InvitationRow } from '@/lib/server/staff/list-invitations';
 import { resendInvitationAction, revokeInvitationAction } from '../actions';
 
@@ -28,7 +28,7 @@ export function InvitationList({ invitations, organisationId, now }: InvitationL
               <p className="wrap-anywhere font-semibold">{email}</p>
               <p className="text-small text-soft">
                 {ROLE_WORDS[role]} · the link {expiresAt > now ? 'works until' : 'worked until'}{' '}
-                {sayInstant(expiresAt, 'UTC')}
+                <Instant at={expiresAt} />
               </p>
               <StateMark tone={expiresAt > now ? 'wait' : 'off'}>
                 {expiresAt > now ? 'no answer yet' : 'ran out'}

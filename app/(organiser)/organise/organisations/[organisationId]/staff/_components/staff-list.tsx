@@ -1,7 +1,7 @@
 import { ActionForm } from '@/components/forms/action-form';
+import { Instant } from '@/components/ui/instant';
 import { ROLE_WORDS } from '@/lib/domain/access/roles';
 import type { OrganisationId } from '@/lib/domain/shared/ids';
-import { sayInstant } from '@/lib/domain/shared/say-date';
 import type { StaffPerson } from '@/lib/server/staff/list-staff';
 import { revokeRoleAction } from '../actions';
 
@@ -26,7 +26,9 @@ export function StaffList({ people, organisationId }: StaffListProps) {
                   <summary className="flex min-h-target flex-wrap items-center justify-between gap-x-6">
                     <span>
                       {ROLE_WORDS[role]}
-                      <span className="block text-small text-soft">since {sayInstant(since, 'UTC')}</span>
+                      <span className="block text-small text-soft">
+                        since <Instant at={since} />
+                      </span>
                     </span>
                     <span className="text-lake underline underline-offset-4">
                       Take away
