@@ -1,3 +1,6 @@
+'use client';
+
+import { useEffect, useRef } from 'react';
 import { ActionButton } from '@/components/forms/action-button';
 import type { OrderedList } from '@/lib/server/camps/own-rows';
 import { moveRowAction } from '../organise/camps/[campId]/actions';
@@ -13,6 +16,14 @@ type MoveButtonsProps = {
 
 /** Up and down by one: order by keyboard, touch and without a script alike. */
 export function MoveButtons({ campId, list, id, name, first, last }: MoveButtonsProps) {
+  const box = useRef<HTMLFieldSetElement>(null);
+  const pressed = useRef(false);
+  // At an end of the list the pressed button goes away, and the focus with it: the other one takes it.
+  useEffect(() => {
+    if (!pressed.current || !(first || last)) return;
+    pressed.current = false;
+    if (document.activeElement === document.body) box.current?.querySelector('button')?.focus();
+  }, [first, last]);
   const button = (towards: 'up' | 'down', edge: boolean) =>
     edge ? (
       <span className="w-11" />
@@ -27,9 +38,16 @@ export function MoveButtons({ campId, list, id, name, first, last }: MoveButtons
       </ActionButton>
     );
   return (
-    <div className="flex gap-2">
+    <fieldset
+      ref={box}
+      aria-label={`Order of ${name}`}
+      className="flex gap-2"
+      onSubmit={() => {
+        pressed.current = true;
+      }}
+    >
       {button('up', first)}
       {button('down', last)}
-    </div>
+    </fieldset>
   );
 }
