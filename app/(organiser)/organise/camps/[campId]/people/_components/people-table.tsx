@@ -85,7 +85,7 @@ export function PeopleTable({ campId, timeZone, page, query, change, onOpen, bus
                     <Tag
                       key={one.id}
                       scope={Tag === 'th' ? 'row' : undefined}
-                      className={`px-2 py-1.5 text-left align-top font-normal ${onPhone(one.column.id)} ${spec(one.column.id)?.end ? 'text-right' : ''}`}
+                      className={`px-1 py-1.5 text-left align-top md:px-2 font-normal ${onPhone(one.column.id)} ${spec(one.column.id)?.end ? 'text-right' : ''}`}
                     >
                       {cell(one.column.id, row.original)}
                     </Tag>

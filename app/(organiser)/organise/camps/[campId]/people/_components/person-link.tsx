@@ -16,12 +16,12 @@ export function PersonLink({ row, campId, onOpen }: PersonLinkProps) {
           event.preventDefault();
           onOpen(row.id);
         }}
-        className="inline-flex min-h-target items-center break-words font-semibold md:min-h-7"
+        className="inline-flex min-h-target items-center wrap-anywhere font-semibold md:min-h-7"
       >
         {row.name}
       </Link>
       {row.minor && <span className="ml-2 whitespace-nowrap text-small text-soft">under age</span>}
-      <span className="block text-small text-soft md:hidden">
+      <span className="wrap-anywhere block text-small text-soft md:hidden">
         {row.track}, <span className="figures">{row.reference}</span>
       </span>
     </>

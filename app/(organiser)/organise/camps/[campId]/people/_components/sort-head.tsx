@@ -16,7 +16,7 @@ type SortHeadProps = {
 export function SortHead({ column, campId, query, change, className }: SortHeadProps) {
   if (!column) return null;
   const here = column.sort === query.sort;
-  const cell = `sticky top-0 z-10 bg-board px-2 py-1 align-bottom font-semibold ${column.end ? 'text-right' : ''} ${className}`;
+  const cell = `sticky top-0 z-10 bg-board px-1 py-1 align-bottom md:px-2 font-semibold ${column.end ? 'text-right' : ''} ${className}`;
   if (!column.sort)
     return (
       <th scope="col" className={cell}>
