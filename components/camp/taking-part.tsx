@@ -13,7 +13,7 @@ export function TakingPart({ camp }: { camp: ProgrammeCamp }) {
           <p className="text-soft">The organiser has not written the refund terms yet.</p>
         )}
         <p className="mt-2 text-small text-soft">
-          These terms are stored with your order as they stand when you register.
+          These terms are kept with your booking as they stand when you register.
         </p>
       </div>
       <div>

@@ -34,7 +34,7 @@ export function WhoFields({ firstDay }: { firstDay: string }) {
           <TextField
             name="payerEmail"
             label="Payer’s e-mail address"
-            hint="The order and the receipt go there."
+            hint="The booking’s link and the receipt go there."
             type="email"
             autoComplete="billing email"
             spellCheck={false}

@@ -38,7 +38,7 @@ export default async function CheckPage({ params }: PageProps<'/camps/[slug]/reg
             <h3>If you cannot come</h3>
             <p className="mt-1 whitespace-pre-line">{camp.refundTerms}</p>
             <p className="mt-1 text-small text-soft">
-              These terms are kept with your order as they stand now.
+              These terms are kept with your booking as they stand now.
             </p>
           </div>
         )}

@@ -22,7 +22,7 @@ export default async function TicketPage({ params }: PageProps<'/my/registration
   const { camp } = programme;
   return (
     <div className="mx-auto max-w-md pb-16">
-      <h1 className="break-words">{person.attendeeName}</h1>
+      <h1 className="break-words text-h2 sm:text-h1">{person.attendeeName}</h1>
       <p className="mt-1 break-words text-lead">
         {camp.name}, {sayDays(camp.startsOn, camp.endsOn)}
       </p>
