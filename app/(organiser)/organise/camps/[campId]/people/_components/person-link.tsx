@@ -1,5 +1,6 @@
 import type { Route } from 'next';
 import Link from 'next/link';
+import { ARRIVAL_WORDS } from '@/lib/domain/door/arrival-states';
 import type { PeopleRow } from '@/lib/domain/people/people-row';
 
 type PersonLinkProps = { row: PeopleRow; campId: string; onOpen: (registrationId: string) => void };
@@ -23,6 +24,7 @@ export function PersonLink({ row, campId, onOpen }: PersonLinkProps) {
       {row.minor && <span className="ml-2 whitespace-nowrap text-small text-soft">under age</span>}
       <span className="wrap-anywhere block text-small text-soft md:hidden">
         {row.track}, <span className="figures">{row.reference}</span>
+        {row.arrival !== 'expected' && `, ${ARRIVAL_WORDS[row.arrival].toLowerCase()}`}
       </span>
     </>
   );

@@ -13,7 +13,7 @@ export function BlockForm({ campId, blockId, defaultValue }: BlockFormProps) {
       defaultValue={defaultValue}
     >
       <div className="grid gap-6 sm:grid-cols-2">
-        <TextField name="starts" label="From" type="time" />
+        <TextField name="starts" label="From" type="time" hint="No other time of day starts then." />
         <TextField name="ends" label="Until" type="time" hint="After midnight counts for the same evening." />
       </div>
       <TextField name="label" label="Name" optional hint="Like First morning or Evening." />
