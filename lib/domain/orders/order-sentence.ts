@@ -31,7 +31,7 @@ export function orderSentence(facts: OrderFacts, now: number): string {
     case 'transferred':
       return 'This booking was passed on to another person.';
     case 'expired':
-      return 'It was not paid in time, so the place went back. Money that came in later is returned in full.';
+      return 'It was not paid in time, so the place went back. Money that comes in later gets you a place again while one is free; else all of it goes back to you.';
   }
 }
 

@@ -40,6 +40,7 @@ export function OrderMoney({ view }: { view: OrderView }) {
             {formatMoney(amount, currency)} {BACK[state]}.
           </p>
         ))}
+        {order.state === 'expired' && receipts.length === 0 && <p className="mt-2">Nothing was charged.</p>}
         {due > 0 && <p className="mt-2 font-semibold">Still to pay: {formatMoney(due, order.currency)}</p>}
       </div>
     </Section>
