@@ -47,7 +47,7 @@ type CampPeople = {
 /** Registers a camp's people one after the other; answers the registration of each, in the order of `names`. */
 export function seedRegistrations(db: Db, given: CampPeople): RegistrationId[] {
   const { camp, random } = given;
-  const programme = loadProgramme(camp.id, db);
+  const programme = loadProgramme(camp.id);
   if (!programme) throw new Error(`No camp ${camp.id}`);
   const seats = new Map(
     programme.workshops.map((workshop) => [workshop.id, workshop.capacity ?? Number.POSITIVE_INFINITY]),

@@ -20,3 +20,17 @@ export function getDb(): Db {
 export function inTransaction<T>(run: (tx: Tx) => T): T {
   return getDb().transaction(run, { behavior: 'immediate' });
 }
+
+/**
+ * Queries that are built and prepared once a connection instead of at every call, which for a query of a few rows
+ * takes longer than running it. In a transaction they see what it wrote: this process has the one connection.
+ */
+export function preparedOnce<Queries extends object>(build: (db: Db) => Queries): () => Queries {
+  const by = new WeakMap<Db, Queries>();
+  return () => {
+    const db = getDb();
+    const known = by.get(db) ?? build(db);
+    by.set(db, known);
+    return known;
+  };
+}

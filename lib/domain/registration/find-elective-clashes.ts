@@ -1,5 +1,5 @@
 import type { TrackId, WorkshopId } from '../shared/ids';
-import { localInterval } from '../shared/local-time';
+import { daysAround, localInterval } from '../shared/local-time';
 import { ownMeetings } from '../timetable/own-meetings';
 import type { Programme } from '../timetable/programme';
 
@@ -19,8 +19,13 @@ export function findElectiveClashes(
   programme: Pick<Programme, 'workshops' | 'meetings'> & { camp: { timeZone: string } },
   wanted: { trackId: TrackId; electives: readonly WorkshopId[] },
 ): ElectiveClash[] {
-  const mine = ownMeetings(programme, wanted)
-    .filter(({ workshop }) => workshop.audience !== 'everyone')
+  const own = ownMeetings(programme, wanted).filter(({ workshop }) => workshop.audience !== 'everyone');
+  // Only what lies around a chosen elective can clash with one; instants are the costly part.
+  const days = new Set(
+    own.filter(({ workshop }) => workshop.audience === 'elective').flatMap(({ day }) => daysAround(day)),
+  );
+  const mine = own
+    .filter(({ day }) => days.has(day))
     .map((meeting) => ({
       ...meeting,
       ...localInterval(meeting.day, meeting.starts, meeting.lengthMinutes, programme.camp.timeZone),

@@ -12,6 +12,12 @@ export function daysBetween(first: string, last: string): string[] {
   return days;
 }
 
+/** The day before, the day and the day after: what can overlap a meeting that runs past midnight. */
+export const daysAround = (day: string): string[] => {
+  const at = Temporal.PlainDate.from(day);
+  return [at.subtract({ days: 1 }).toString(), day, at.add({ days: 1 }).toString()];
+};
+
 /**
  * Half-open interval in epoch ms of wall time `day` + `starts` (HH:MM) in an IANA zone, `minutes` of real time long.
  * A wall time that a clock change skips moves forward, one that comes twice is its first (Temporal's "compatible").

@@ -51,7 +51,7 @@ function factsOf(tx: Tx, own: CampRow, after: EditCampInput): DetailsFacts {
     state: own.state,
     before: own,
     after,
-    taken: countPlaces(own.id, tx)?.camp.taken ?? 0,
+    taken: countPlaces(own.id)?.camp.taken ?? 0,
     orders: tx.select({ n: count() }).from(order).where(eq(order.campId, own.id)).get()?.n ?? 0,
     meetings: tx
       .select({ title: workshop.title, day: meeting.day })

@@ -34,12 +34,12 @@ export function editOwnCamp<T>(
     return inTransaction((tx): Result<T, Refusal> => {
       const own = ownCamp(actor, campId, 'camp.edit', tx);
       if (!own) return refuse('not_found');
-      const lackedBefore = own.state === 'published' ? lacking(tx, campId) : null;
+      const lackedBefore = own.state === 'published' ? lacking(campId) : null;
       const edited = run(tx, own);
       if (!edited.ok) throw new Undo(edited.error);
       const { value, ...note } = edited.value;
       tx.update(camp).set({ updatedAt: now }).where(eq(camp.id, campId)).run();
-      if (lackedBefore) keepSelling(lacking(tx, campId).filter((said) => !lackedBefore.includes(said)));
+      if (lackedBefore) keepSelling(lacking(campId).filter((said) => !lackedBefore.includes(said)));
       writeAudit(tx, {
         organisationId: own.organisationId,
         campId,
@@ -55,8 +55,8 @@ export function editOwnCamp<T>(
   }
 }
 
-function lacking(tx: Tx, campId: CampId): string[] {
-  const programme = loadProgramme(campId, tx);
+function lacking(campId: CampId): string[] {
+  const programme = loadProgramme(campId);
   return programme ? missingForSale(programme) : [];
 }
 

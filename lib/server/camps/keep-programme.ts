@@ -25,7 +25,7 @@ export function keepProgramme(campId: CampId): Omit<Kept, 'stamp'> | null {
   const stamp = stampOf(db);
   const held = camps.get(campId);
   if (held?.stamp === stamp) return held;
-  const programme = loadProgramme(campId, db);
+  const programme = loadProgramme(campId);
   if (!programme) return null;
   const harps = new Map(programme.tracks.map(({ id }) => [id, trackHarps(programme, id)]));
   if (camps.size >= MOST) camps.clear();

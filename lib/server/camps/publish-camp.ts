@@ -22,7 +22,7 @@ export function publishCamp(
   const { now } = context;
   return editOwnCamp(campId, context, (tx, own) => {
     if (own.state === 'published') return refuse('stale', { sentence: 'The camp is on sale already.' });
-    const programme = loadProgramme(campId, tx);
+    const programme = loadProgramme(campId);
     if (!programme) return refuse('not_found');
     const items = publishChecklist(programme, localDay(now, own.timeZone));
     if (!mayPublish(items)) {

@@ -38,7 +38,7 @@ export function loadAttendee(registrationId: RegistrationId, db: Db | Tx = getDb
     .leftJoin(ticket, and(eq(ticket.registrationId, registration.id), isNull(ticket.revokedAt)))
     .where(eq(registration.id, registrationId))
     .get();
-  const programme = person && loadProgramme(person.campId, db);
+  const programme = person && loadProgramme(person.campId);
   if (!programme) return null;
   const electives = db
     .select({ id: registrationWorkshop.workshopId })

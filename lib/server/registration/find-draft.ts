@@ -1,11 +1,11 @@
 import 'server-only';
-import { and, eq } from 'drizzle-orm';
+import { and, eq, sql } from 'drizzle-orm';
 import { draft, order } from '@/db/schema/order';
 import type { Answers } from '@/lib/domain/registration/answers';
 import type { RegistrationState } from '@/lib/domain/registration/states';
 import type { CampId, Id, OrderId } from '@/lib/domain/shared/ids';
 import { readAnswers } from '@/lib/schemas/answers';
-import { type Db, getDb, type Tx } from '../db';
+import { preparedOnce } from '../db';
 import { hashToken } from '../hash-token';
 
 export type Draft = {
@@ -16,15 +16,21 @@ export type Draft = {
   order: { id: OrderId; state: RegistrationState } | null;
 };
 
-/** What this browser has answered for this camp so far. */
-export function findDraft(token: string | null, campId: CampId, db: Db | Tx = getDb()): Draft | null {
-  if (!token) return null;
-  const row = db
+const queries = preparedOnce((db) => ({
+  draft: db
     .select({ id: draft.id, answers: draft.answers, orderId: order.id, orderState: order.state })
     .from(draft)
     .leftJoin(order, eq(order.id, draft.orderId))
-    .where(and(eq(draft.tokenHash, hashToken(token)), eq(draft.campId, campId)))
-    .get();
+    .where(
+      and(eq(draft.tokenHash, sql.placeholder('tokenHash')), eq(draft.campId, sql.placeholder('campId'))),
+    )
+    .prepare(),
+}));
+
+/** What this browser has answered for this camp so far. */
+export function findDraft(token: string | null, campId: CampId): Draft | null {
+  if (!token) return null;
+  const row = queries().draft.get({ tokenHash: hashToken(token), campId });
   if (!row) return null;
   return {
     id: row.id,

@@ -38,10 +38,10 @@ export function holdPlaces(
   now: number,
 ): Result<OrderId, HoldRefusal> {
   return inTransaction((tx) => {
-    const known = findDraft(token, campId, tx);
+    const known = findDraft(token, campId);
     if (known?.order) return ok(known.order.id);
-    const programme = loadProgramme(campId, tx);
-    const left = countPlaces(campId, tx);
+    const programme = loadProgramme(campId);
+    const left = countPlaces(campId);
     if (!programme || !left || !known) return err({ code: 'unanswered', step: 'who' });
     const sale = saleState(programme.camp, now);
     if (sale !== 'open') return err({ code: 'camp_closed', sale });

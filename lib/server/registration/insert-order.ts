@@ -1,6 +1,6 @@
 import 'server-only';
 import { randomBytes } from 'node:crypto';
-import { eq } from 'drizzle-orm';
+import { eq, sql } from 'drizzle-orm';
 import {
   order,
   orderLine,
@@ -14,7 +14,7 @@ import { CONSENT_TEXT, type CompleteAnswers } from '@/lib/domain/registration/an
 import type { Quote } from '@/lib/domain/registration/quote-registration';
 import { foldSearch } from '@/lib/domain/shared/fold-search';
 import type { CampId, OrderId, OrganisationId, UserId } from '@/lib/domain/shared/ids';
-import type { Tx } from '../db';
+import { preparedOnce, type Tx } from '../db';
 import { newId } from '../new-id';
 
 export type NewOrder = {
@@ -39,7 +39,7 @@ export function insertOrder(tx: Tx, given: NewOrder): OrderId {
       id,
       organisationId: given.organisationId,
       campId: given.campId,
-      reference: freeReference(tx),
+      reference: freeReference(),
       state: 'held',
       payerUserId: payer.userId,
       payerName: payer.name,
@@ -94,9 +94,17 @@ export function insertOrder(tx: Tx, given: NewOrder): OrderId {
   return id;
 }
 
-function freeReference(tx: Tx): string {
+const queries = preparedOnce((db) => ({
+  taken: db
+    .select({ id: order.id })
+    .from(order)
+    .where(eq(order.reference, sql.placeholder('reference')))
+    .prepare(),
+}));
+
+function freeReference(): string {
   for (;;) {
     const reference = orderReference(randomBytes(24));
-    if (reference && !tx.select().from(order).where(eq(order.reference, reference)).get()) return reference;
+    if (reference && !queries().taken.get({ reference })) return reference;
   }
 }

@@ -20,7 +20,7 @@ export function saveAnswer(
   now: number,
 ): { token: string; answers: Answers } | null {
   return inTransaction((tx) => {
-    const known = findDraft(token, campId, tx);
+    const known = findDraft(token, campId);
     if (known?.order?.state === 'held') return null;
     if (known && token) {
       const before = known.order ? {} : { ...known.answers, warned: known.warned };

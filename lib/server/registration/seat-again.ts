@@ -11,7 +11,7 @@ import { countPlaces } from './count-places';
 /** Paid after its hold ran out: takes the same places again if every one is left and the camp still sells. */
 export function seatAgain(tx: Tx, row: typeof order.$inferSelect, now: number): boolean {
   const at = tx.select().from(camp).where(eq(camp.id, row.campId)).get();
-  const left = countPlaces(row.campId, tx);
+  const left = countPlaces(row.campId);
   if (!at || !left || saleState(at, now) !== 'open') return false;
   const people = tx.select().from(registration).where(eq(registration.orderId, row.id)).all();
   const chosen = tx

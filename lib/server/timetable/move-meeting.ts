@@ -19,7 +19,7 @@ export function moveMeeting(
   { actor, now }: Pick<Context, 'actor' | 'now'>,
 ): Result<{ meetingId: MeetingId }, Refusal> {
   return inTransaction((tx) => {
-    const programme = ownCamp(actor, campId, 'timetable.edit', tx) && loadProgramme(campId, tx);
+    const programme = ownCamp(actor, campId, 'timetable.edit', tx) && loadProgramme(campId);
     const row = programme?.meetings.find(({ id }) => id === meetingId);
     if (!programme || !row) return refuse('not_found');
     if (row.updatedAt !== updatedAt)

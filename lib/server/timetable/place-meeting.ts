@@ -19,7 +19,7 @@ export function placeMeeting(
   { actor, now }: Pick<Context, 'actor' | 'now'>,
 ): Result<{ meetingId: MeetingId }, Refusal> {
   return inTransaction((tx) => {
-    const programme = ownCamp(actor, campId, 'timetable.edit', tx) && loadProgramme(campId, tx);
+    const programme = ownCamp(actor, campId, 'timetable.edit', tx) && loadProgramme(campId);
     if (!programme) return refuse('not_found');
     const usual = programme.workshops.find(({ id }) => id === workshopId)?.lengthMinutes ?? 60;
     const row = {

@@ -17,7 +17,7 @@ export function removeMeeting(
   { actor, now }: Pick<Context, 'actor' | 'now'>,
 ): Result<null, Refusal> {
   return inTransaction((tx) => {
-    const programme = ownCamp(actor, campId, 'timetable.edit', tx) && loadProgramme(campId, tx);
+    const programme = ownCamp(actor, campId, 'timetable.edit', tx) && loadProgramme(campId);
     const row = programme?.meetings.find(({ id }) => id === meetingId);
     if (!programme || !row) return refuse('not_found');
     if (row.updatedAt !== updatedAt)

@@ -38,7 +38,7 @@ export function saveTrack(
     const before = tx.select().from(track).where(own).get();
     if (!before) return refuse('not_found');
     if (seen && seen !== rowMark(before)) return refuse('stale');
-    const taken = countPlaces(campId, tx)?.tracks.find(({ id }) => id === trackId)?.places.taken;
+    const taken = countPlaces(campId)?.tracks.find(({ id }) => id === trackId)?.places.taken;
     if (taken !== undefined && row.capacity < taken)
       return refuse('bad_input', {
         fields: {

@@ -27,14 +27,14 @@ export function saveWorkshop(
 ): Result<SavedWorkshop, Refusal> {
   const { campId, workshopId, seen, title } = input;
   return editOwnCamp(campId, context, (tx) => {
-    const before = loadProgramme(campId, tx);
+    const before = loadProgramme(campId);
     const row = before?.workshops.find(({ id }) => id === workshopId);
     if (!before || (workshopId && !row)) return refuse('not_found');
     if (row && seen && seen !== rowMark(row)) return refuse('stale');
     const refusal = refusalOf(tx, input);
     if (refusal) return { ok: false, error: refusal };
     const id = write(tx, input, context.now);
-    const after = loadProgramme(campId, tx) ?? before;
+    const after = loadProgramme(campId) ?? before;
     const clashes = newClashes(before, after);
     if (clashes.length > 0)
       return refuse('bad_input', {
