@@ -15,6 +15,7 @@ import type { Quote } from '@/lib/domain/registration/quote-registration';
 import { foldSearch } from '@/lib/domain/shared/fold-search';
 import type { CampId, OrderId, OrganisationId, UserId } from '@/lib/domain/shared/ids';
 import { preparedOnce, type Tx } from '../db';
+import { insertPrepared } from '../insert-prepared';
 import { newId } from '../new-id';
 
 export type NewOrder = {
@@ -34,62 +35,55 @@ export function insertOrder(tx: Tx, given: NewOrder): OrderId {
   const { now, quote, payer } = given;
   const id = newId('ord', now);
   const stamp = { createdAt: now, updatedAt: now };
-  tx.insert(order)
-    .values({
-      id,
-      organisationId: given.organisationId,
-      campId: given.campId,
-      reference: freeReference(),
-      state: 'held',
-      payerUserId: payer.userId,
-      payerName: payer.name,
-      payerEmail: payer.email,
-      currency: quote.currency,
-      total: quote.total,
-      refundTerms: given.refundTerms,
-      heldUntil: given.heldUntil,
-      ...stamp,
-    })
-    .run();
+  insertPrepared(tx, order, {
+    id,
+    organisationId: given.organisationId,
+    campId: given.campId,
+    reference: freeReference(),
+    state: 'held',
+    payerUserId: payer.userId,
+    payerName: payer.name,
+    payerEmail: payer.email,
+    currency: quote.currency,
+    total: quote.total,
+    refundTerms: given.refundTerms,
+    heldUntil: given.heldUntil,
+    ...stamp,
+  });
   for (const [at, { answers, userId }] of given.attendees.entries()) {
     const { who, track, harps, needs } = answers;
     const registrationId = newId('reg', now);
-    tx.insert(registration)
-      .values({
-        id: registrationId,
-        orderId: id,
-        campId: given.campId,
-        trackId: track.trackId,
-        attendeeUserId: userId,
-        attendeeName: who.attendeeName,
-        attendeeSearch: foldSearch(who.attendeeName),
-        attendeeEmail: who.attendeeEmail,
-        minor: who.minor,
-        state: 'held',
-        ...stamp,
-      })
-      .run();
+    insertPrepared(tx, registration, {
+      id: registrationId,
+      orderId: id,
+      campId: given.campId,
+      trackId: track.trackId,
+      attendeeUserId: userId,
+      attendeeName: who.attendeeName,
+      attendeeSearch: foldSearch(who.attendeeName),
+      attendeeEmail: who.attendeeEmail,
+      minor: who.minor,
+      state: 'held',
+      ...stamp,
+    });
     const { consent, ...kept } = needs;
     // What a guardian said is kept for a minor only.
     const guardian = who.minor
       ? { consentAt: consent ? now : null, consentText: consent ? CONSENT_TEXT : '' }
       : { guardianName: '', guardianEmail: '', guardianPhone: '' };
-    tx.insert(registrationNeeds)
-      .values({ registrationId, ...kept, ...guardian })
-      .run();
-    if (track.electives.length > 0)
-      tx.insert(registrationWorkshop)
-        .values(track.electives.map((workshopId) => ({ registrationId, workshopId })))
-        .run();
-    if (harps.harpIds.length > 0)
-      tx.insert(registrationHarp)
-        .values(harps.harpIds.map((harpId) => ({ registrationId, harpId })))
-        .run();
+    insertPrepared(tx, registrationNeeds, { registrationId, ...kept, ...guardian });
+    for (const workshopId of track.electives)
+      insertPrepared(tx, registrationWorkshop, { registrationId, workshopId });
+    for (const harpId of harps.harpIds) insertPrepared(tx, registrationHarp, { registrationId, harpId });
     const line = quote.lines[at];
     if (!line) throw new Error('The quote has fewer lines than the order has attendees');
-    tx.insert(orderLine)
-      .values({ id: newId('lin', now), orderId: id, registrationId, ...line, position: at + 1 })
-      .run();
+    insertPrepared(tx, orderLine, {
+      id: newId('lin', now),
+      orderId: id,
+      registrationId,
+      ...line,
+      position: at + 1,
+    });
   }
   return id;
 }
