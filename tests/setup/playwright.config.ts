@@ -15,6 +15,8 @@ export default defineConfig({
   reporter: [['list'], ['json', { outputFile: '../e2e/results/report.json' }]],
   use: {
     baseURL: process.env.E2E_APP_URL ?? 'http://localhost:3000',
+    actionTimeout: 20_000,
+    navigationTimeout: 30_000,
     trace: 'retain-on-failure',
     screenshot: 'only-on-failure',
     launchOptions: { executablePath: process.env.CHROMIUM_PATH || undefined, args: CHROMIUM_ARGS },

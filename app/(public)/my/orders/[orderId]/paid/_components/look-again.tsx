@@ -6,7 +6,7 @@ import { useEffect, useState } from 'react';
 const EVERY = 3_000;
 const TIMES = 40;
 
-/** Loads the page's news afresh every few seconds for two minutes; without JavaScript, by the link. */
+/** Loads the page's news afresh every few seconds for two minutes; without JavaScript the browser loads it again itself. */
 export function LookAgain() {
   const router = useRouter();
   const [times, setTimes] = useState(0);
@@ -19,8 +19,13 @@ export function LookAgain() {
     return () => clearTimeout(timer);
   }, [times, router]);
   return (
-    <a href="?" className="inline-flex min-h-target items-center">
-      Look again now
-    </a>
+    <>
+      <noscript>
+        <meta httpEquiv="refresh" content="4" />
+      </noscript>
+      <a href="?" className="inline-flex min-h-target items-center">
+        Look again now
+      </a>
+    </>
   );
 }
