@@ -74,12 +74,6 @@ export const a4Schema = z.preprocess(
     .max(446, 'A4 is 446 Hz or less: use a number from 440 to 446.'),
 );
 
-export const harpSchema = z.object({
-  root: pitchClassSchema,
-  tuning: tuningSchema,
-  register: registerSchema,
-});
-
 /** A harp as a form or an address sends it, canonical on the way out: `Gb-richter-low` → `Fs-richter-low`. */
 export const harpIdSchema = read(
   (text) => {
@@ -105,7 +99,6 @@ export const harpAskSchema = z.discriminatedUnion(
   ],
   { error: 'Say whether the harp is named by its own key or by a song and a position.' },
 );
-export type HarpAskInput = z.input<typeof harpAskSchema>;
 
 /** One thing to bring. No alternative means that any key will do. */
 export const harpNeedSchema = z.object({
@@ -115,4 +108,3 @@ export const harpNeedSchema = z.object({
   anyOf: z.array(harpAskSchema).max(12, 'Name at most 12 alternatives, or leave it open as any key.'),
   note: z.string().trim().max(200, 'Keep the note to 200 characters.').optional(),
 });
-export type HarpNeedInput = z.input<typeof harpNeedSchema>;

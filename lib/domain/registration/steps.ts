@@ -16,8 +16,6 @@ export const STEP_WORDS = {
 
 export const nextStep = (step: Exclude<Step, 'pay'>): Step => STEPS[STEPS.indexOf(step) + 1] ?? 'pay';
 
-export const previousStep = (step: Step): Step | null => STEPS[STEPS.indexOf(step) - 1] ?? null;
-
 /** A minor's needs are not answered before a guardian is named and has agreed: ticking "under 18" later asks again. */
 const needsAnswered = ({ who, needs }: Answers): boolean =>
   needs !== undefined &&

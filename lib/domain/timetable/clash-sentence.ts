@@ -1,7 +1,7 @@
 import { Temporal } from 'temporal-polyfill';
 import type { MeetingId } from '../shared/ids';
 import { clockAfter } from '../shared/local-time';
-import { type Clash, isRefused } from './clash';
+import type { Clash } from './clash';
 import { SOUND_WORDS } from './kind-loudness';
 import type { Programme } from './programme';
 
@@ -43,10 +43,6 @@ export function clashSentence(clash: Clash, names: Names, about?: MeetingId): st
       return `${title(self)} is ${SOUND_WORDS[clash.needs].toLowerCase()}, louder than ${nameOf(names.rooms, clash.roomId)} can take.`;
   }
 }
-
-/** Sentences of the clashes that cannot stand; for refusals and for the checklist before publishing. */
-export const refusedSentences = (clashes: readonly Clash[], names: Names, about?: MeetingId): string[] =>
-  clashes.filter(isRefused).map((clash) => clashSentence(clash, names, about));
 
 const gap = (minutes: number): string =>
   minutes === 0 ? 'no time' : `only ${minutes} ${minutes === 1 ? 'minute' : 'minutes'}`;
